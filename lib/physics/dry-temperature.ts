@@ -15,7 +15,7 @@ export interface DryBuild {
   /** between the faces of the cover: twin-wall sheet 1/U − 0.17, film and glass 0 [m²K/W] */
   coverResistanceM2KPerW: number;
   gapM: number;
-  /** loss through back and edges [W/(m²K)] */
+  /** loss through back and edges, a face layer counted (`backLossWithFaceLayer`) [W/(m²K)] */
   backLossWPerM2K: number;
   tiltDeg: number;
   /** pressure of the air [Pa] */
@@ -172,13 +172,25 @@ export function dryYearFromDeclared(
 }
 
 /**
- * Temperature at the face of the back insulation proper, behind a heat-proof layer: T = Tp − Ub R (Tp − Ta).
+ * Loss through the back with a heat-proof layer in front of its insulation: U = Ub/(1 + Ub R).
+ * @param backLossWPerM2K loss through back and edges without the layer Ub [W/(m²K)]
+ * @param faceLayerM2KPerW resistance of the layer R [m²K/W] from 0
+ * @returns loss through back and edges [W/(m²K)]
+ * @remarks the edges are counted as if they stood behind the layer too
+ * @see ISO 6946:2017, 6.7, layers in series
+ */
+export function backLossWithFaceLayer(backLossWPerM2K: number, faceLayerM2KPerW: number): number {
+  return backLossWPerM2K / (1 + backLossWPerM2K * faceLayerM2KPerW);
+}
+
+/**
+ * Temperature at the hot face of the back insulation, behind a heat-proof layer: T = Ta + (Tp − Ta)/(1 + Ub R).
  * @param plateC plate temperature [°C]
  * @param airC air temperature [°C]
- * @param backLossWPerM2K loss through the whole back, layer included [W/(m²K)]
- * @param faceLayerM2KPerW resistance of the layer between absorber and insulation [m²K/W] from 0
- * @returns temperature of the insulation's hot face [°C], never below that of the air
- * @see steady conduction through layers in series, ISO 6946:2017, 6.7
+ * @param backLossWPerM2K loss through back and edges without the layer Ub [W/(m²K)]
+ * @param faceLayerM2KPerW resistance of the layer R [m²K/W] from 0
+ * @returns temperature of the insulation's hot face [°C]
+ * @see ISO 6946:2017, 6.7, layers in series
  */
 export function backFaceC(
   plateC: number,
@@ -186,5 +198,5 @@ export function backFaceC(
   backLossWPerM2K: number,
   faceLayerM2KPerW: number,
 ): number {
-  return plateC - Math.min(1, backLossWPerM2K * faceLayerM2KPerW) * (plateC - airC);
+  return airC + (plateC - airC) / (1 + backLossWPerM2K * faceLayerM2KPerW);
 }
