@@ -51,7 +51,7 @@ export function floorSurfaceExcess(heatWm2: number): number {
  * @remarks below 0.5 K the coefficient is held, so that it never vanishes
  * @see EN 1264-2:2008, 6; the bound at 0.5 K is an own choice
  */
-export function slabFilmWPerM2K(excessK: number): number {
+export function floorSurfaceCoefficient(excessK: number): number {
   return 8.92 * Math.max(Math.abs(excessK), LEAST_EXCESS_K) ** 0.1;
 }
 
@@ -67,7 +67,7 @@ export function slabFilmWPerM2K(excessK: number): number {
  * (difference about 1 % at 65 mm)
  * @see EN 1264-2:2008, 6 and Table A.1 (from memory)
  */
-export function floorConductanceWPerM2K(
+export function floorConductance(
   spacingMm: number,
   screedMm: number,
   screedConductivity: number,
@@ -110,7 +110,7 @@ export function logarithmicExcess(supplyC: number, returnC: number, roomC: numbe
  * @returns conductance from mean water to slab surface [W/(m²K)]
  * @see EN 1264-2:2008, 6: K_H holds the film of 10.8 W/(m²K)
  */
-export function waterToSlabConductanceWPerM2K(conductance: number): number {
+export function waterToSlabConductance(conductance: number): number {
   return 1 / (1 / conductance - 1 / FLOOR_FILM_W_PER_M2K);
 }
 
@@ -124,7 +124,7 @@ export function waterToSlabConductanceWPerM2K(conductance: number): number {
  * @remarks exact with the film fixed at 10.8; with the film by its law −7…+2 % between 20 and 100 W/m²
  * @see EN 1264-2:2008, 6 and eq. 1: logarithmic excess integrated along the loop
  */
-export function supplyToSlabConductanceWPerK(
+export function supplyToSlabConductance(
   areaM2: number,
   conductance: number,
   capacityFlowWPerK: number,

@@ -24,7 +24,7 @@ export function radiatorFactor(excessK: number, exponent: number): number {
  * @returns rated output [W]
  * @see EN 442-2:2014
  */
-export function ratedOutputW(
+export function ratedOutput(
   outputW: number,
   supplyC: number,
   returnC: number,
@@ -58,7 +58,7 @@ export function arithmeticExcess(supplyC: number, returnC: number, roomC: number
  * @remarks arithmetic mean excess also at wide spreads, where the logarithmic mean would give less
  * @see EN 442-2:2014; energy balance of the water
  */
-export function radiatorHeatW(
+export function radiatorHeat(
   ratedW: number,
   exponent: number,
   supplyC: number,
@@ -98,6 +98,6 @@ export function loopReturnC(supplyC: number, heatW: number, capacityFlowWPerK: n
  * @returns mass flow [kg/s]
  * @see energy balance of the water, EN 1264-3
  */
-export function loopFlowKgPerS(heatW: number, spreadK: number, specificHeat: number): number {
+export function loopFlow(heatW: number, spreadK: number, specificHeat: number): number {
   return heatW / (specificHeat * spreadK);
 }
