@@ -1,6 +1,7 @@
 import { HOURS_PER_YEAR } from '@/lib/units/constants';
 import { hourRuns, MAX_GAP_H } from '@/lib/weather/hour-runs';
 import { type HourTable, hourWords } from '@/lib/weather/hour-table';
+import { withThousands } from '@/lib/weather/with-thousands';
 import type { ReadOptions, RowProblem, WeatherRefusal } from '@/lib/weather/weather-result';
 import type { WeatherNote } from '@/lib/weather/weather-year';
 
@@ -29,9 +30,9 @@ export function checkRows(
   noteStamps(table, notes);
   const hours = table.rows - table.leapLines.length;
   if (hours > 1.5 * HOURS_PER_YEAR) return notHourly(hours);
+  if (!table.lineOfHour.includes(0) && table.twice.length === 0) return null;
   const missing = missingRows(table);
-  if (missing.rows.length === 0 && table.twice.length === 0) return null;
-  const found = `The file has ${hours.toLocaleString('en-GB')} hours; a year needs 8,760.`;
+  const found = `The file has ${withThousands(hours)} hours; a year needs 8,760.`;
   const refusal = missing.rows.length > 0 ? rowsMissing(found, table, missing) : rowsTwice(found, table);
   if (!options.repair || refusal.repair === undefined) return refusal;
   if (table.twice.length > 0) {
@@ -128,6 +129,6 @@ function notHourly(hours: number): WeatherRefusal {
   return {
     ok: false,
     code: 'not-hourly',
-    message: `The file has ${hours.toLocaleString('en-GB')} rows; a year of hours has 8,760. Export it with hourly values for one year.`,
+    message: `The file has ${withThousands(hours)} rows; a year of hours has 8,760. Export it with hourly values for one year.`,
   };
 }

@@ -1,4 +1,5 @@
 import { FAHRENHEIT_OFFSET, FAHRENHEIT_PER_KELVIN, HOURS_PER_YEAR, J_PER_WH } from '@/lib/units/constants';
+import { columnRange } from '@/lib/weather/column-range';
 import type { HourColumns } from '@/lib/weather/hour-table';
 import type { ReadOptions, WeatherRefusal } from '@/lib/weather/weather-result';
 import type { WeatherNote } from '@/lib/weather/weather-year';
@@ -29,7 +30,7 @@ function checkIrradiance(
   notes: WeatherNote[],
   options: ReadOptions,
 ): WeatherRefusal | null {
-  const peak = columns.globalWm2.reduce((a, b) => Math.max(a, b), 0);
+  const peak = columnRange(columns.globalWm2).max;
   if (peak >= MIN_PEAK_WM2 && peak <= MAX_PEAK_WM2) return null;
   const found = `The strongest global irradiance is ${peak.toFixed(peak < 10 ? 2 : 0)}; in W/m² it lies between ${MIN_PEAK_WM2} and 1,500.`;
   const refusal = { ok: false, code: 'irradiance-units' } as const;
@@ -56,10 +57,7 @@ function checkTemperature(
   notes: WeatherNote[],
   options: ReadOptions,
 ): WeatherRefusal | null {
-  const values = columns.dryBulbC;
-  const max = values.reduce((a, b) => Math.max(a, b), -Infinity);
-  const min = values.reduce((a, b) => Math.min(a, b), Infinity);
-  const mean = values.reduce((a, b) => a + b, 0) / HOURS_PER_YEAR;
+  const { min, max, mean } = columnRange(columns.dryBulbC);
   if (mean <= 30 && max <= 57 && max - min <= 85 && min >= -75) return null;
   const found = `Air temperature runs from ${min.toFixed(1)} to ${max.toFixed(1)} with a mean of ${mean.toFixed(1)}`;
   const refusal = { ok: false, code: 'temperature-units' } as const;

@@ -4,9 +4,11 @@ import { standardPressurePa } from '@/lib/weather/air-pressure';
 import { checkRows } from '@/lib/weather/check-rows';
 import { checkSite } from '@/lib/weather/check-site';
 import { checkUnits } from '@/lib/weather/check-units';
+import { columnRange } from '@/lib/weather/column-range';
 import { dewPointC, dewPointFromDailyMinimum } from '@/lib/weather/dew-point';
 import { fillGaps } from '@/lib/weather/fill-gaps';
 import type { HourColumns, HourTable } from '@/lib/weather/hour-table';
+import { withThousands } from '@/lib/weather/with-thousands';
 import type { ReadOptions, WeatherResult } from '@/lib/weather/weather-result';
 import type { WeatherNote, WeatherYear } from '@/lib/weather/weather-year';
 
@@ -25,9 +27,11 @@ export type YearHead = Pick<
 
 /** Reflectance of snow-free ground; common practice since Liu & Jordan 1963. */
 export const DEFAULT_ALBEDO = 0.2;
-/** Less than this is a filler, not a sky [W/m²] or an air pressure [Pa]. */
+/** Outside these a value is a filler of the file's maker: no sky [W/m²], air pressure [Pa] or ground [-] is so. */
 const MIN_SKY_LONGWAVE_WM2 = 50;
 const MIN_PRESSURE_PA = 30_000;
+const MAX_PRESSURE_PA = 110_000;
+const MIN_ALBEDO = 0.01;
 
 /**
  * A year from the rows of a file: checks rows, gaps, units and site, then derives the columns that the file lacks.
@@ -67,6 +71,7 @@ export function completeYear(head: YearHead, table: HourTable, options: ReadOpti
 function dropNegatives(columns: HourColumns, table: HourTable, notes: WeatherNote[]): void {
   const rows: number[] = [];
   for (const values of [columns.globalWm2, columns.beamNormalWm2, columns.diffuseWm2, columns.windMPerS]) {
+    if (columnRange(values).min >= 0) continue;
     for (let h = 0; h < HOURS_PER_YEAR; h++) {
       if (values[h]! >= 0) continue;
       values[h] = 0;
@@ -108,7 +113,7 @@ function fillHumidityAndSky(columns: HourColumns, notes: WeatherNote[]): void {
 
 function fillPressure(columns: HourColumns, elevationM: number, notes: WeatherNote[]): void {
   const standard = standardPressurePa(elevationM);
-  const filled = fillWhere(columns.pressurePa, (value) => !(value >= MIN_PRESSURE_PA), standard);
+  const filled = fillOutside(columns.pressurePa, MIN_PRESSURE_PA, MAX_PRESSURE_PA, standard);
   if (filled > 0) {
     const message = `${hourCount(filled)} without air pressure: ${(standard / 1000).toFixed(1)} kPa by altitude.`;
     notes.push({ kind: 'assumption', message });
@@ -116,17 +121,18 @@ function fillPressure(columns: HourColumns, elevationM: number, notes: WeatherNo
 }
 
 function fillAlbedo(columns: HourColumns, notes: WeatherNote[]): void {
-  const filled = fillWhere(columns.albedo, (value) => !(value > 0 && value <= 1), DEFAULT_ALBEDO);
+  const filled = fillOutside(columns.albedo, MIN_ALBEDO, 1, DEFAULT_ALBEDO);
   if (filled > 0) {
     const message = `${hourCount(filled)} without ground reflectance: ${DEFAULT_ALBEDO} taken.`;
     notes.push({ kind: 'assumption', message });
   }
 }
 
-function fillWhere(values: Float64Array, isMissing: (value: number) => boolean, filler: number): number {
+/** Puts the filler where a value is unknown or outside its range. */
+function fillOutside(values: Float64Array, low: number, high: number, filler: number): number {
   let filled = 0;
   for (let h = 0; h < HOURS_PER_YEAR; h++) {
-    if (!isMissing(values[h]!)) continue;
+    if (values[h]! >= low && values[h]! <= high) continue;
     values[h] = filler;
     filled++;
   }
@@ -134,5 +140,5 @@ function fillWhere(values: Float64Array, isMissing: (value: number) => boolean, 
 }
 
 function hourCount(hours: number): string {
-  return hours === HOURS_PER_YEAR ? 'All hours' : `${hours.toLocaleString('en-GB')} hours`;
+  return hours === HOURS_PER_YEAR ? 'All hours' : `${withThousands(hours)} hours`;
 }

@@ -51,9 +51,7 @@ export function fillGaps(
 
 function gapsOf(table: HourTable, column: HourColumn, words: string): Gap[] {
   const values = table.columns[column];
-  let complete = true;
-  for (let hour = 0; hour < HOURS_PER_YEAR && complete; hour++) complete = !Number.isNaN(values[hour]!);
-  if (complete) return [];
+  if (!values.includes(NaN)) return [];
   return hourRuns((hour) => Number.isNaN(values[hour]!)).map((run) => {
     const before = (run.start + HOURS_PER_YEAR - 1) % HOURS_PER_YEAR;
     return { ...run, column, words, row: table.lineOfHour[run.start]! || table.lineOfHour[before]! };

@@ -1,7 +1,23 @@
 import { completeYear } from '@/lib/weather/complete-year';
-import { HourTable } from '@/lib/weather/hour-table';
+import { type HourColumn, HourTable } from '@/lib/weather/hour-table';
 import { ByteScanner, splitFields } from '@/lib/weather/scan-bytes';
 import type { ReadOptions, WeatherRefusal, WeatherResult } from '@/lib/weather/weather-result';
+
+/** Fields of a row that are read: month, day, hour first; values from the missing code upwards are unknown. */
+const STAMP_FIELDS = [1, 2, 3] as const;
+const VALUE_FIELDS: readonly (readonly [field: number, column: HourColumn, missingCode: number])[] = [
+  [6, 'dryBulbC', 99.9],
+  [7, 'dewPointC', 99.9],
+  [8, 'relativeHumidity', 999],
+  [9, 'pressurePa', 999_999],
+  [12, 'skyLongwaveWm2', 9999],
+  [13, 'globalWm2', 9999],
+  [14, 'beamNormalWm2', 9999],
+  [15, 'diffuseWm2', 9999],
+  [21, 'windMPerS', 999],
+  [32, 'albedo', 999],
+];
+const FIELDS_READ = 33;
 
 /** Header lines begin with a word, perhaps quoted, data rows with a year. */
 function startsHeader(byte: number): boolean {
@@ -33,10 +49,7 @@ export function readEpw(bytes: Uint8Array, options: ReadOptions = {}): WeatherRe
       return notHourly(perHour, scanner.line - 1);
   }
   const table = new HourTable();
-  while (!scanner.atEnd) {
-    if (!scanner.blankLine()) readRow(scanner, table);
-    scanner.nextLine();
-  }
+  readRows(scanner, table);
   return completeYear(
     {
       name: location[1] || 'Unnamed place',
@@ -53,34 +66,25 @@ export function readEpw(bytes: Uint8Array, options: ReadOptions = {}): WeatherRe
   );
 }
 
-/** 35 fields: 1–3 month, day, hour; 6–9 air; 12 long-wave; 13–15 irradiance; 21 wind; 32 albedo. */
-function readRow(scanner: ByteScanner, table: HourTable): void {
-  scanner.skipFields(1);
-  const month = scanner.number();
-  const day = scanner.number();
-  const hour = scanner.number();
-  const at = table.place(month, day, hour, scanner.line);
-  if (at < 0) return;
-  const { columns } = table;
-  scanner.skipFields(2);
-  columns.dryBulbC[at] = below(scanner.number(), 99.9);
-  columns.dewPointC[at] = below(scanner.number(), 99.9);
-  columns.relativeHumidity[at] = below(scanner.number(), 999);
-  columns.pressurePa[at] = below(scanner.number(), 999_999);
-  scanner.skipFields(2);
-  columns.skyLongwaveWm2[at] = below(scanner.number(), 9999);
-  columns.globalWm2[at] = below(scanner.number(), 9999);
-  columns.beamNormalWm2[at] = below(scanner.number(), 9999);
-  columns.diffuseWm2[at] = below(scanner.number(), 9999);
-  scanner.skipFields(5);
-  columns.windMPerS[at] = below(scanner.number(), 999);
-  scanner.skipFields(10);
-  columns.albedo[at] = below(scanner.number(), 999);
-}
-
-/** Values from the missing code upwards are unknown. */
-function below(value: number, missingCode: number): number {
-  return value < missingCode ? value : NaN;
+function readRows(scanner: ByteScanner, table: HourTable): void {
+  const wanted = new Uint8Array(FIELDS_READ);
+  for (const field of [...STAMP_FIELDS, ...VALUE_FIELDS.map(([field]) => field)]) wanted[field] = 1;
+  const targets = VALUE_FIELDS.map(([field, column, missingCode]) => ({
+    field,
+    values: table.columns[column],
+    missingCode,
+  }));
+  const row = new Float64Array(FIELDS_READ);
+  const [month, day, hour] = STAMP_FIELDS;
+  for (; !scanner.atEnd; scanner.nextLine()) {
+    if (scanner.blankLine()) continue;
+    scanner.numbers(wanted, row);
+    const at = table.place(row[month]!, row[day]!, row[hour]!, scanner.line);
+    if (at < 0) continue;
+    for (const { field, values, missingCode } of targets) {
+      values[at] = row[field]! < missingCode ? row[field]! : NaN;
+    }
+  }
 }
 
 function noLocation(): WeatherRefusal {

@@ -19,9 +19,9 @@ const COLUMN_PREFIXES: readonly (readonly [prefix: string, column: HourColumn, r
   ['alb (', 'albedo', false],
 ];
 
-/** One column to read: how many fields stand between it and the one before. */
-interface Pick {
-  skip: number;
+/** One column to read: its field after date and time, and where its values go. */
+interface Target {
+  field: number;
   values: Float64Array;
   factor: number;
 }
@@ -46,12 +46,9 @@ export function readTmy3(bytes: Uint8Array, options: ReadOptions = {}): WeatherR
     return noHeader(2, 'no line of column names that begins with Date and Time');
   }
   const table = new HourTable();
-  const picks = pickColumns(names, table);
-  if (!Array.isArray(picks)) return picks;
-  while (!scanner.atEnd) {
-    if (!scanner.blankLine()) readRow(scanner, table, picks);
-    scanner.nextLine();
-  }
+  const targets = findColumns(names.slice(2), table);
+  if (!Array.isArray(targets)) return targets;
+  readRows(scanner, table, targets);
   return completeYear(
     {
       name: station[1] || 'Unnamed place',
@@ -68,34 +65,35 @@ export function readTmy3(bytes: Uint8Array, options: ReadOptions = {}): WeatherR
   );
 }
 
-function pickColumns(names: readonly string[], table: HourTable): Pick[] | WeatherRefusal {
-  const found: { at: number; column: HourColumn }[] = [];
+function findColumns(names: readonly string[], table: HourTable): Target[] | WeatherRefusal {
+  const targets: Target[] = [];
   for (const [prefix, column, required] of COLUMN_PREFIXES) {
-    const at = names.findIndex((name) => name.startsWith(prefix));
-    if (at >= 0) found.push({ at, column });
-    else if (required) return noHeader(2, `no column whose name begins with "${prefix}"`);
+    const field = names.findIndex((name) => name.startsWith(prefix));
+    if (field < 0 && required) return noHeader(2, `no column whose name begins with "${prefix}"`);
+    const factor = column === 'pressurePa' ? PA_PER_MBAR : 1;
+    if (field >= 0) targets.push({ field, values: table.columns[column], factor });
   }
-  found.sort((a, b) => a.at - b.at);
-  return found.map(({ at, column }, i) => ({
-    skip: at - (i === 0 ? 1 : found[i - 1]!.at) - 1,
-    values: table.columns[column],
-    factor: column === 'pressurePa' ? PA_PER_MBAR : 1,
-  }));
+  return targets;
 }
 
-/** MM/DD/YYYY,HH:MM, then the picked columns. */
-function readRow(scanner: ByteScanner, table: HourTable, picks: readonly Pick[]): void {
-  const month = scanner.digits();
-  const day = scanner.digits();
-  scanner.digits();
-  const hour = scanner.digits();
-  scanner.digits();
-  const at = table.place(month, day, hour, scanner.line);
-  if (at < 0) return;
-  for (const pick of picks) {
-    scanner.skipFields(pick.skip);
-    const value = scanner.number();
-    pick.values[at] = value > MISSING_CODE ? value * pick.factor : NaN;
+/** MM/DD/YYYY,HH:MM, then the fields of the columns. */
+function readRows(scanner: ByteScanner, table: HourTable, targets: readonly Target[]): void {
+  const wanted = new Uint8Array(Math.max(...targets.map(({ field }) => field)) + 1);
+  for (const { field } of targets) wanted[field] = 1;
+  const row = new Float64Array(wanted.length);
+  for (; !scanner.atEnd; scanner.nextLine()) {
+    if (scanner.blankLine()) continue;
+    const month = scanner.digits();
+    const day = scanner.digits();
+    scanner.digits();
+    const hour = scanner.digits();
+    scanner.digits();
+    scanner.numbers(wanted, row);
+    const at = table.place(month, day, hour, scanner.line);
+    if (at < 0) continue;
+    for (const { field, values, factor } of targets) {
+      values[at] = row[field]! > MISSING_CODE ? row[field]! * factor : NaN;
+    }
   }
 }
 
