@@ -126,6 +126,7 @@ const twinWall = collectorSchema.parse({
     absorberEmittance: 0.92,
     coverEmittance: 0.9,
     coverLongwaveTransmittance: 0.02,
+    coverResistanceM2KPerW: 0.14,
     gapMm: 25,
     backLossWPerM2K: 0.9,
   },

@@ -181,6 +181,17 @@ export const dryModelSchema = z.discriminatedUnion('kind', [
       source: 'PE film 0.80, PET film 0.2, glass and sheets 0.02 (MIL-HDBK-1003/13A, table 2-3)',
       help: 'A film that lets long-wave radiation through runs cooler when dry.',
     }),
+    coverResistanceM2KPerW: quantity({
+      label: 'Cover resistance',
+      unit: 'm²K/W',
+      min: 0,
+      max: 1,
+      step: 0.01,
+      default: 0,
+      origin: 'handbook',
+      source: 'twin-wall sheet: 1/U − 0.17; 10 mm 0.14; film and glass 0',
+      help: 'Between the inner and the outer face of the cover.',
+    }),
     gapMm: quantity({
       label: 'Air gap',
       unit: 'mm',

@@ -37,14 +37,10 @@ export const arraySchema = z.object({
     source: 'demonstration: 12° west of south',
     help: 'Clockwise from true north; 180° = south.',
   }),
-  mountedMonths: z
-    .array(z.boolean())
-    .length(12)
-    .default(Array<boolean>(12).fill(true))
-    .meta({
-      label: 'Months mounted',
-      help: 'January to December. The array is put up and taken down with the first and last of them.',
-    }),
+  mountedMonths: z.array(z.boolean()).length(12).default(Array<boolean>(12).fill(true)).meta({
+    label: 'Months mounted',
+    help: 'January to December. The array is put up and taken down with the first and last of them.',
+  }),
   liftM: quantity({
     label: 'Lift',
     unit: 'm',
@@ -216,6 +212,10 @@ export const storeSchema = z.object({
     source: 'demonstration: a lined box 2.0 × 1.0 × 1.0 m',
     help: 'Height of the water in the store.',
   }),
+  shape: z
+    .enum(['box', 'cylinder'])
+    .default('box')
+    .meta({ label: 'Shape', help: 'A lined box or a round vessel.' }),
   layers: quantity({
     label: 'Layers',
     unit: '',

@@ -358,21 +358,15 @@ export const houseSchema = z.object({
     source: '3 to 5 W/m² of floor; no source',
     help: 'People, lights, appliances; mean over the day.',
   }),
-  windowOpening: z
-    .boolean()
-    .default(true)
-    .meta({
-      label: 'Windows opened above 25 °C',
-      help: 'Four-fold ventilation while the rooms are too warm.',
-    }),
+  windowOpening: z.boolean().default(true).meta({
+    label: 'Windows opened above 25 °C',
+    help: 'Four-fold ventilation while the rooms are too warm.',
+  }),
   emitters: z.object({
-    kind: z
-      .enum(['water', 'ideal'])
-      .default('water')
-      .meta({
-        label: 'Heat reaches the room by',
-        help: '“ideal” puts heat straight into the room air, as in the hourly method of ISO 13790: for checking the house alone.',
-      }),
+    kind: z.enum(['water', 'ideal']).default('water').meta({
+      label: 'Heat reaches the room by',
+      help: '“ideal” puts heat straight into the room air, as in the hourly method of ISO 13790: for checking the house alone.',
+    }),
     floor: floorSchema,
     radiators: radiatorsSchema,
   }),

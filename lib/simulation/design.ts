@@ -1,3 +1,5 @@
+import type { CapacityClass } from '@/lib/physics/house-network';
+
 /**
  * The engine's own view of its inputs: plain objects in SI-based trade units. The zod schemas of
  * `lib/schemas` produce values assignable to these types; the engine itself knows no schema.
@@ -40,6 +42,8 @@ export type DryModel =
       absorberEmittance: number;
       coverEmittance: number;
       coverLongwaveTransmittance: number;
+      /** resistance between the faces of the cover: twin-wall sheet, 0 for film and glass [m²K/W] */
+      coverResistanceM2KPerW: number;
       gapMm: number;
       /** loss through back and edges [W/(m²K)] */
       backLossWPerM2K: number;
@@ -110,6 +114,7 @@ export interface Controller {
 export interface Store {
   volumeL: number;
   heightM: number;
+  shape: 'box' | 'cylinder';
   layers: number;
   insulationMm: number;
   /** [W/(m K)] */
@@ -155,8 +160,6 @@ export interface WindowGain {
   shade: number;
   frameFraction: number;
 }
-
-export type CapacityClass = 'very light' | 'light' | 'medium' | 'heavy' | 'very heavy';
 
 export interface Floor {
   areaM2: number;

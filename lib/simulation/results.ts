@@ -127,6 +127,8 @@ export interface YearTotals extends EnergyRow {
   storeMaxC: number;
   /** highest plate temperature that the run itself reached (not the dry temperature) */
   plateMaxC: number;
+  /** coldest water that left the store for the array [°C]; Infinity if none did */
+  coldestInletC: number;
   carrierHours: number[];
   overLimitHours: number;
   designLoadW: number;

@@ -1,0 +1,227 @@
+/**
+ * The collector array and its outdoor pipes: full and running, or empty. Each state follows the exact
+ * exponential of its linearised balance around the stable root of the quadratic loss, so that the moments at
+ * which the controller switches come in closed form.
+ *
+ * @see ISO 9806:2017, collector model of clause 24 (from memory); model.md sections 3, 7 and 12 of the method pages
+ */
+
+import { WATER_SPECIFIC_HEAT_J_PER_KG_K as CP } from '@/lib/physics/water';
+import type { StoreLayers } from './store-layers';
+
+/** What does not change during a year. */
+export interface ArrayLoopInput {
+  /** effective area on the basis of the curve [m²] */
+  areaM2: number;
+  a2: number;
+  /** [J/K] */
+  dryCapacityJPerK: number;
+  /** water of array and outdoor pipes when full [kg] */
+  waterKg: number;
+  /** wall of the outdoor pipes [J/K] */
+  pipeCapacityJPerK: number;
+  /** loss of the pipe of one way [W/K] */
+  pipeLossWPerK: number;
+  flowKgPerS: number;
+  startK: number;
+  stopK: number;
+  inhibitC: number;
+  minimumRunS: number;
+}
+
+export class ArrayLoop {
+  readonly input: ArrayLoopInput;
+  private readonly waterJPerK: number;
+  private readonly fullJPerK: number;
+  private readonly flowWPerK: number;
+  /** share of the excess over outdoor air that survives one pipe [-] */
+  private readonly pipeKept: number;
+
+  /** hour's drive: absorbed sun [W/m²], linear loss [W/(m²K)], outdoor air [°C] */
+  absorbedWm2 = 0.5;
+  a1 = 0.5;
+  outdoorC = 0.5;
+
+  full = false;
+  /** water and plate while full, plate while empty [°C] */
+  arrayC = 10.5;
+  pipeC = 10.5;
+  /** what is left of the minimum run [s] */
+  mustRunS = 0.5;
+  starts = 0;
+
+  /** of the last sub-step: heat lost by array, by pipes, given to the store [J] */
+  arrayLossJ = 0.5;
+  pipeLossJ = 0.5;
+  givenJ = 0.5;
+
+  private root = 0.5;
+  private rootLossWm2 = 0.5;
+  private slope = 0.5;
+  private decay = 0.5;
+
+  constructor(input: ArrayLoopInput) {
+    this.input = input;
+    this.waterJPerK = input.waterKg * CP;
+    this.fullJPerK = input.dryCapacityJPerK + this.waterJPerK;
+    this.flowWPerK = input.flowKgPerS * CP;
+    this.pipeKept = this.flowWPerK > 0 ? Math.exp(-input.pipeLossWPerK / this.flowWPerK) : 0;
+  }
+
+  /** Heat held by plate, water and pipe wall above 0 °C, water in the store not counted [J]. */
+  heatJ(): number {
+    const array = this.full ? this.fullJPerK : this.input.dryCapacityJPerK;
+    return array * this.arrayC + this.input.pipeCapacityJPerK * this.pipeC;
+  }
+
+  /**
+   * Linearises the balance `C dT/dt = A S + 2ṁc(Tin − T) − A(a1Δ + a2Δ|Δ|)` around its stable root.
+   * @param flowWPerK 2ṁc while running, 0 while empty [W/K]
+   * @param inletC Tin [°C]
+   */
+  private linearise(flowWPerK: number, inletC: number, capacityJPerK: number): void {
+    const { areaM2, a2 } = this.input;
+    const drive = areaM2 * this.absorbedWm2 + flowWPerK * (inletC - this.outdoorC);
+    const p = areaM2 * this.a1 + flowWPerK;
+    const size = Math.abs(drive);
+    const excess = (2 * size) / (p + Math.sqrt(p * p + 4 * areaM2 * a2 * size));
+    const delta = drive < 0 ? -excess : excess;
+    this.root = this.outdoorC + delta;
+    this.rootLossWm2 = this.a1 * delta + a2 * delta * excess;
+    this.slope = this.a1 + a2 * (excess + Math.abs(this.arrayC - this.outdoorC));
+    this.decay = (areaM2 * this.slope + flowWPerK) / capacityJPerK;
+  }
+
+  /** Time until the exponential passes `targetC` [s]; Infinity if it does not. */
+  private timeTo(targetC: number): number {
+    const ratio = (targetC - this.root) / (this.arrayC - this.root);
+    return ratio > 0 && ratio < 1 ? -Math.log(ratio) / this.decay : Infinity;
+  }
+
+  /** Prepares a sub-step with the pump standing. */
+  prepareEmpty(): void {
+    this.linearise(0, 0, this.input.dryCapacityJPerK);
+  }
+
+  /**
+   * Time until the pump may start [s]: plate above bottom + start difference and below the inhibit temperature.
+   * @param bottomC bottom layer of the store [°C]
+   */
+  timeToStart(bottomC: number): number {
+    const start = bottomC + this.input.startK;
+    const inhibit = this.input.inhibitC;
+    const plate = this.arrayC;
+    if (start >= inhibit) return Infinity;
+    if (plate > inhibit + 1e-9) return this.root < inhibit ? this.timeTo(inhibit) : Infinity;
+    if (plate >= start - 1e-9) return plate < inhibit || this.root < plate ? 0 : Infinity;
+    return this.root > start ? this.timeTo(start) : Infinity;
+  }
+
+  /** The empty plate over `dtS`; the pipe wall relaxes to outdoor air. */
+  advanceEmpty(dtS: number): void {
+    const { areaM2, pipeCapacityJPerK, pipeLossWPerK } = this.input;
+    const x = this.decay * dtS;
+    const e = Math.exp(-x);
+    const gap = this.arrayC - this.root;
+    const meanGap = x > 1e-9 ? (gap * (1 - e)) / x : gap;
+    this.arrayLossJ = areaM2 * (this.rootLossWm2 + this.slope * meanGap) * dtS;
+    this.arrayC = this.root + gap * e;
+    this.givenJ = 0;
+    this.pipeLossJ = 0;
+    const pipeGap = this.pipeC - this.outdoorC;
+    if (pipeCapacityJPerK > 0 && Math.abs(pipeGap) > 1e-6 && pipeLossWPerK > 0) {
+      const kept = Math.exp((-2 * pipeLossWPerK * dtS) / pipeCapacityJPerK);
+      this.pipeLossJ = pipeCapacityJPerK * pipeGap * (1 - kept);
+      this.pipeC = this.outdoorC + pipeGap * kept;
+    }
+  }
+
+  /** Water temperature at the array's inlet for water of `bottomC` leaving the store [°C]. */
+  inletC(bottomC: number): number {
+    return this.outdoorC + (bottomC - this.outdoorC) * this.pipeKept;
+  }
+
+  /** Prepares a running sub-step with inlet water from `bottomC`. */
+  prepareRunning(bottomC: number): void {
+    this.linearise(2 * this.flowWPerK, this.inletC(bottomC), this.fullJPerK);
+  }
+
+  /** Time until outlet − inlet falls below the stop difference [s], not before the minimum run is over. */
+  timeToStop(bottomC: number): number {
+    const stop = this.inletC(bottomC) + 0.5 * this.input.stopK;
+    let time = Infinity;
+    if (this.arrayC <= stop + 1e-9) time = 0;
+    else if (this.root < stop) time = this.timeTo(stop);
+    return Math.max(time, this.mustRunS);
+  }
+
+  /** Whether outlet − inlet is below the stop difference now and the minimum run is over. */
+  wantsStop(bottomC: number): boolean {
+    return this.mustRunS <= 1e-7 && this.arrayC <= this.inletC(bottomC) + 0.5 * this.input.stopK + 1e-9;
+  }
+
+  /** Mean temperature at which the water of a sub-step of `dtS` comes back to the store [°C], state untouched. */
+  chargeC(dtS: number, bottomC: number): number {
+    const x = this.decay * dtS;
+    const gap = this.arrayC - this.root;
+    const meanGap = x > 1e-9 ? (gap * -Math.expm1(-x)) / x : gap;
+    const outletC = 2 * (this.root + meanGap) - this.inletC(bottomC);
+    return this.outdoorC + (outletC - this.outdoorC) * this.pipeKept;
+  }
+
+  /** Moves the root for an inlet that is warmer by `riseK` at the store; exact for the linearised balance. */
+  shiftInlet(riseK: number): void {
+    const flow = 2 * this.flowWPerK;
+    const capacityTimesDecay = this.decay * this.fullJPerK;
+    const step = (flow * riseK * this.pipeKept) / capacityTimesDecay;
+    this.root += step;
+    this.rootLossWm2 += this.slope * step;
+  }
+
+  /** The running array over `dtS` with mean bottom temperature `bottomC` already applied by `shiftInlet`. */
+  advanceRunning(dtS: number, bottomC: number, chargeC: number): void {
+    const { areaM2 } = this.input;
+    const x = this.decay * dtS;
+    const e = Math.exp(-x);
+    const gap = this.arrayC - this.root;
+    const meanGap = x > 1e-9 ? (gap * (1 - e)) / x : gap;
+    const meanC = this.root + meanGap;
+    const inletC = this.inletC(bottomC);
+    const outletC = 2 * meanC - inletC;
+    this.arrayLossJ = areaM2 * (this.rootLossWm2 + this.slope * meanGap) * dtS;
+    this.pipeLossJ = this.flowWPerK * (bottomC - inletC + (outletC - chargeC)) * dtS;
+    this.givenJ = this.flowWPerK * (chargeC - bottomC) * dtS;
+    this.arrayC = this.root + gap * e;
+    this.mustRunS -= dtS;
+  }
+
+  /** The pump starts: water of the bottom layer meets the dry plate and the pipe wall. */
+  fill(store: StoreLayers): void {
+    const { dryCapacityJPerK, pipeCapacityJPerK, waterKg } = this.input;
+    const bottomC = store.bottomC;
+    const pipeHeatJ = pipeCapacityJPerK * (bottomC - this.pipeC);
+    store.takeFromBottom(waterKg);
+    this.arrayC = (dryCapacityJPerK * this.arrayC + this.waterJPerK * bottomC) / this.fullJPerK;
+    this.pipeC = bottomC;
+    store.coolBottom(pipeHeatJ);
+    this.full = true;
+    this.mustRunS = this.input.minimumRunS;
+    this.starts++;
+  }
+
+  /** The pump stops: the outdoor water comes home at its temperature into its level. */
+  drain(store: StoreLayers): void {
+    store.bringHome(this.input.waterKg, this.arrayC);
+    this.full = false;
+  }
+
+  /**
+   * The array is put up or taken down: the plate takes the temperature of outdoor air.
+   * @returns heat that leaves with it [J]
+   */
+  relax(): number {
+    const heat = this.input.dryCapacityJPerK * (this.arrayC - this.outdoorC);
+    this.arrayC = this.outdoorC;
+    return heat;
+  }
+}

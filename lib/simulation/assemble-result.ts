@@ -1,0 +1,149 @@
+import { J_PER_KWH, SECONDS_PER_HOUR, WH_PER_KWH } from '@/lib/units/constants';
+import { markCarriers } from './carriers';
+import { judgeDryHours, type DryColumns } from './dry-hours';
+import { ENGINE_VERSION } from './engine-version';
+import { solarFractions } from './fractions';
+import { houseHeat } from './house-heat';
+import type { Plan } from './plan';
+import type { EnergyBalance, EnergyRow, YearResult } from './results';
+import type { ReferenceNeed, SimulationInput } from './simulate';
+import { monthSum, type MonthField, type Tally } from './tally';
+import type { YearState } from './year';
+import { DAYS_IN_MONTH, HOURS_PER_DAY } from '@/lib/units/constants';
+
+/** Turns the sums and columns of a run into the result that people read. */
+export function assembleResult(
+  input: SimulationInput,
+  plan: Plan,
+  state: YearState,
+  tally: Tally,
+  reference: ReferenceNeed,
+  dry: DryColumns,
+): YearResult {
+  const { columns } = tally;
+  const heat = houseHeat(input.house);
+  const carrierHours = markCarriers(columns, heat.designLoadW);
+  const { parts, overLimitHours } = judgeDryHours(
+    dry,
+    plan.columns.mounted,
+    plan.columns.planeWm2,
+    input.design.collector,
+    columns,
+  );
+  const months = Array.from({ length: 12 }, (_, month) => monthRow(tally, month, plan.pumpW));
+  const sum = yearRow(months);
+  const efficiency = input.house.backup.seasonalEfficiency;
+  const backupKwh = sum.backupHeatingKwh + sum.backupTapKwh;
+  return {
+    engineVersion: ENGINE_VERSION,
+    layers: plan.layers,
+    theta: plan.theta,
+    subSteps: state.subSteps,
+    weatherName: input.weather.name,
+    synthetic: input.weather.synthetic,
+    columns,
+    months,
+    year: {
+      ...sum,
+      fractions: solarFractions({
+        solarKwh: sum.solarHeatingKwh + sum.solarTapKwh,
+        backupKwh,
+        unmetKwh: sum.unmetKwh,
+        pumpKwh: sum.pumpKwh,
+        referenceNeedKwh: reference.needKwh + reference.unmetKwh,
+        backupEfficiency: efficiency,
+        referenceEfficiency: efficiency,
+      }),
+      referenceNeedKwh: reference.needKwh,
+      boughtKwh: backupKwh / efficiency,
+      referenceBoughtKwh: reference.needKwh / efficiency,
+      roomMinC: least(columns.roomC),
+      roomMaxC: largest(columns.roomC),
+      floorMaxC: largest(columns.floorSurfaceC),
+      storeMaxC: largest(columns.storeTopC),
+      plateMaxC: tally.plateMaxC,
+      coldestInletC: tally.coldestInletC,
+      carrierHours,
+      overLimitHours,
+      designLoadW: heat.designLoadW,
+    },
+    balance: energyBalance(tally, plan),
+    dryParts: parts,
+  };
+}
+
+function monthRow(tally: Tally, month: number, pumpW: number): EnergyRow {
+  const of = (field: MonthField) => monthSum(tally.monthJ, month, field);
+  const kwh = (field: MonthField) => of(field) / J_PER_KWH;
+  const pumpHours = of('pumpS') / SECONDS_PER_HOUR;
+  return {
+    heatingKwh: kwh('heating'),
+    tapKwh: kwh('tap'),
+    solarHeatingKwh: kwh('solarHeating'),
+    solarTapKwh: kwh('solarTap'),
+    backupHeatingKwh: kwh('backupHeating'),
+    backupTapKwh: kwh('backupTap'),
+    unmetKwh: kwh('unmet'),
+    collectedKwh: kwh('collected'),
+    planeKwh: kwh('plane'),
+    storeLossKwh: kwh('storeLoss'),
+    pipeLossKwh: kwh('pipeLoss'),
+    pumpKwh: (pumpW * pumpHours) / WH_PER_KWH,
+    unusedKwh: kwh('unused'),
+    starts: of('starts'),
+    pumpHours,
+    meanOutdoorC: of('outdoorCS') / (DAYS_IN_MONTH[month]! * HOURS_PER_DAY * SECONDS_PER_HOUR),
+  };
+}
+
+function yearRow(months: EnergyRow[]): EnergyRow {
+  const year = { ...months[0]! };
+  const keys = Object.keys(year) as (keyof EnergyRow)[];
+  for (const key of keys) year[key] = months.reduce((sum, month) => sum + month[key], 0);
+  const days = DAYS_IN_MONTH.reduce((sum, day) => sum + day, 0);
+  year.meanOutdoorC = months.reduce((sum, m, i) => sum + m.meanOutdoorC * DAYS_IN_MONTH[i]!, 0) / days;
+  return year;
+}
+
+function energyBalance(tally: Tally, plan: Plan): EnergyBalance {
+  const kwh = (joules: number) => joules / J_PER_KWH;
+  const inKwh = {
+    arraySun: kwh(tally.arraySunJ),
+    backup: kwh(tally.backupJ),
+    windowSun: kwh(tally.windowSunJ),
+    internal: kwh(tally.internalJ),
+  };
+  const outKwh = {
+    arrayLoss: kwh(tally.arrayLossJ),
+    pipeLoss: kwh(tally.pipeLossJ),
+    // inside the house this heat stays in the rooms and leaves through the shell
+    storeLoss: plan.storeInside ? 0 : kwh(tally.storeLossJ),
+    houseTransmission: kwh(tally.transmissionJ),
+    houseVentilation: kwh(tally.ventilationJ),
+    windowReloss: kwh(tally.windowRelossJ),
+    floorDownward: kwh(tally.downwardJ),
+    tap: kwh(tally.tapJ),
+    dismounted: kwh(tally.dismountedJ),
+  };
+  const storedKwh = {
+    array: kwh(tally.changeJ[0]!),
+    pipes: kwh(tally.changeJ[1]!),
+    store: kwh(tally.changeJ[2]!),
+    house: kwh(tally.changeJ[3]!),
+  };
+  const total = (parts: Record<string, number>) => Object.values(parts).reduce((sum, x) => sum + x, 0);
+  const residualKwh = total(inKwh) - total(outKwh) - total(storedKwh);
+  return { inKwh, outKwh, storedKwh, residualKwh, residualShare: Math.abs(residualKwh) / total(inKwh) };
+}
+
+function largest(values: Float32Array): number {
+  let most = -Infinity;
+  for (const value of values) if (value > most) most = value;
+  return most;
+}
+
+function least(values: Float32Array): number {
+  let most = Infinity;
+  for (const value of values) if (value < most) most = value;
+  return most;
+}

@@ -1,0 +1,333 @@
+import { linearLoss } from '@/lib/physics/collector';
+import { slabCapacity, supplyToSlabConductance } from '@/lib/physics/floor';
+import { mainsC, tappingShares } from '@/lib/physics/hot-water';
+import { beamModifier } from '@/lib/physics/incidence-angle';
+import { resetSupplyC } from '@/lib/physics/outdoor-reset';
+import { pressureDropPa } from '@/lib/physics/pipe-flow';
+import { frictionHeadM, liftPowerW, runningHeadM } from '@/lib/physics/pump';
+import { layerLossesWPerK } from '@/lib/physics/store-loss';
+import {
+  waterDensity,
+  waterViscosity,
+  WATER_KG_PER_L,
+  WATER_SPECIFIC_HEAT_J_PER_KG_K as CP,
+} from '@/lib/physics/water';
+import { solarApertureM2 } from '@/lib/physics/window-gain';
+import type { PlaneYear } from '@/lib/sun/plane-year';
+import {
+  HOURS_PER_DAY,
+  HOURS_PER_YEAR,
+  L_PER_M3,
+  MM_PER_M,
+  SECONDS_PER_HOUR,
+  STEFAN_BOLTZMANN,
+  toKelvin,
+  toRadians,
+} from '@/lib/units/constants';
+import type { WeatherYear } from '@/lib/weather/weather-year';
+import type { Collector, CollectorArray, Design, House, SkyModel } from './design';
+import { dryColumns, type DryColumns } from './dry-hours';
+import { emitterLoop, houseHeat } from './house-heat';
+import type { Plan, PlanColumns } from './plan';
+import type { SimulationInput } from './simulate';
+import { SiteCache } from './site-cache';
+import { monthOf } from './tally';
+
+/** Vertical conduction of a store: water, wall and mixing together [W/(m K)]. */
+const STORE_CONDUCTIVITY = 1;
+/** Screed below the pipe's crown that takes part in storing heat [mm]. */
+const SCREED_AROUND_PIPE_MM = 20;
+/** Water at which pipe friction is worked [°C]; roughness of drawn pipe [m]; bends and tees of one loop [-]. */
+const FRICTION_WATER_C = 30;
+const PIPE_ROUGHNESS_M = 1.5e-6;
+const LOOP_FITTINGS = 12;
+/** A run is given up beyond this many sub-steps; an ordinary design takes about 50,000. */
+const SUB_STEP_CAP = 4_000_000;
+const KEPT = 12;
+/** A small flow that stands for none where a flow divides. */
+const NO_FLOW = 1e-9;
+
+/** Keeps the newest few values by key. */
+class Memo<T> {
+  private readonly kept = new Map<string, T>();
+
+  get(key: string, make: () => T): T {
+    const known = this.kept.get(key);
+    if (known !== undefined) return known;
+    const made = make();
+    if (this.kept.size >= KEPT) this.kept.delete(this.kept.keys().next().value!);
+    this.kept.set(key, made);
+    return made;
+  }
+}
+
+/** Builds plans and keeps what a slider does not touch. */
+export class PlanBuilder {
+  private readonly sites = new WeakMap<WeatherYear, { site: SiteCache; id: number }>();
+  private siteCount = 0;
+  private readonly windows = new Memo<Float64Array>();
+  private readonly supplies = new Memo<Float64Array>();
+  private readonly taps = new Memo<{ tapKgPerS: Float64Array; mainsC: Float64Array }>();
+  private readonly dryYears = new Memo<DryColumns>();
+
+  private siteOf(weather: WeatherYear): { site: SiteCache; id: number } {
+    const known = this.sites.get(weather);
+    if (known) return known;
+    const made = { site: new SiteCache(weather), id: this.siteCount++ };
+    this.sites.set(weather, made);
+    return made;
+  }
+
+  /** The plan of a design. */
+  plan(input: SimulationInput): Plan {
+    const { house, design, numerics } = input;
+    const { site } = this.siteOf(input.weather);
+    const { collector, array } = design;
+    const plane = site.plane(array, numerics.skyModel);
+    const collectorColumns = this.collectorColumns(site, plane, collector, array);
+    const columns: PlanColumns = {
+      outdoorC: site.outdoorC,
+      planeWm2: plane.totalWm2,
+      mounted: mountedHours(array.mountedMonths),
+      ...collectorColumns,
+      ...this.houseColumns(input),
+    };
+    const hasArray = array.areaM2 > 0 && array.mountedMonths.some(Boolean);
+    const storeKg = design.store.volumeL * WATER_KG_PER_L;
+    const baseM2 = design.store.volumeL / L_PER_M3 / design.store.heightM;
+    return {
+      ...this.housePlan(house, design),
+      columns,
+      theta: numerics.theta,
+      subStepCap: SUB_STEP_CAP,
+      hasArray,
+      array: arrayInput(design),
+      storeLimitC: design.controller.storeLimitC,
+      pumpW: pumpPowerW(array),
+      layers: design.store.layers,
+      storeKg,
+      storeLossWPerK: layerLossesWPerK({
+        volumeL: design.store.volumeL,
+        heightM: design.store.heightM,
+        layers: design.store.layers,
+        insulationM: design.store.insulationMm / MM_PER_M,
+        conductivity: design.store.insulationConductivity,
+        shape: design.store.shape,
+      }),
+      conductionWPerK: (STORE_CONDUCTIVITY * baseM2 * design.store.layers) / design.store.heightM,
+      storeRoomC: design.store.roomC,
+      storeInside: design.store.insideHouse,
+    };
+  }
+
+  /** The same house, supply and weather without array and store. */
+  referencePlan(input: SimulationInput): Plan {
+    const { design } = input;
+    const store = { ...design.store, insideHouse: false };
+    return this.plan({ ...input, design: { ...design, store, array: { ...design.array, areaM2: 0 } } });
+  }
+
+  /** Key of all that the reference plan depends on. */
+  referenceKey(input: SimulationInput): string {
+    const { id } = this.siteOf(input.weather);
+    return JSON.stringify([id, input.house, input.design.supply, input.numerics]);
+  }
+
+  /** Dry temperatures of every hour for the design's collector, orientation and wind. */
+  dry(input: SimulationInput): DryColumns {
+    const { site, id } = this.siteOf(input.weather);
+    const { collector, array } = input.design;
+    const { tiltDeg, azimuthDeg, windFactor } = array;
+    const { skyModel } = input.numerics;
+    const { dry, curve, faceLayerM2KPerW } = collector;
+    const key = JSON.stringify([
+      id,
+      tiltDeg,
+      azimuthDeg,
+      windFactor,
+      skyModel,
+      dry,
+      faceLayerM2KPerW,
+      curve.b0,
+      curve.diffuseModifier,
+      dry.kind === 'declared' ? [curve.eta0Beam, curve.a1, curve.a2] : 0,
+    ]);
+    return this.dryYears.get(key, () => {
+      const plane = site.plane(array, skyModel);
+      const acceptedWm2 = new Float64Array(HOURS_PER_YEAR);
+      for (let h = 0; h < HOURS_PER_YEAR; h++) acceptedWm2[h] = accepted(plane, collector, h);
+      return dryColumns(collector, array, {
+        planeWm2: plane.totalWm2,
+        acceptedWm2,
+        outdoorC: site.outdoorC,
+        windMPerS: site.windMPerS,
+        skyLongwaveWm2: input.weather.skyLongwaveWm2,
+      });
+    });
+  }
+
+  private collectorColumns(
+    site: SiteCache,
+    plane: PlaneYear,
+    collector: Collector,
+    array: CollectorArray,
+  ): Pick<PlanColumns, 'absorbedWm2' | 'a1'> {
+    const { eta0Beam, a1, a3, a4, a6 } = collector.curve;
+    const absorbedWm2 = new Float64Array(HOURS_PER_YEAR);
+    const loss = new Float64Array(HOURS_PER_YEAR);
+    const toSky = 0.5 * (1 + Math.cos(toRadians(array.tiltDeg)));
+    const longwave = site.weather.skyLongwaveWm2;
+    for (let h = 0; h < HOURS_PER_YEAR; h++) {
+      const wind = site.windMPerS[h]! * array.windFactor;
+      let sun = eta0Beam * accepted(plane, collector, h);
+      if (a6 !== 0) sun = Math.max(0, sun - a6 * (wind - 3) * plane.totalWm2[h]!);
+      if (a4 !== 0) {
+        // towards the ground the plane sees surfaces at about air temperature: only the sky counts
+        sun += a4 * toSky * (longwave[h]! - STEFAN_BOLTZMANN * toKelvin(site.outdoorC[h]!) ** 4);
+      }
+      absorbedWm2[h] = sun;
+      loss[h] = linearLoss(a1, a3, wind);
+    }
+    return { absorbedWm2, a1: loss };
+  }
+
+  private houseColumns(
+    input: SimulationInput,
+  ): Pick<PlanColumns, 'windowSunW' | 'supplySetC' | 'tapKgPerS' | 'mainsC'> {
+    const { house, design, numerics, weather } = input;
+    const { site, id } = this.siteOf(weather);
+    const windowSunW = this.windows.get(JSON.stringify([id, house.windows, numerics.skyModel]), () =>
+      windowSun(site, house, numerics.skyModel),
+    );
+    const loop = emitterLoop(house, houseHeat(house), design.supply);
+    const curve = {
+      roomC: house.roomSetC,
+      designOutdoorC: house.designOutdoorC,
+      designSupplyC: design.supply.designSupplyC,
+      designSpreadK: design.supply.designSpreadK,
+      exponent: loop.exponent,
+      limitC: design.supply.limitC,
+    };
+    const supplySetC = this.supplies.get(JSON.stringify([id, curve]), () =>
+      site.outdoorC.map((outdoorC) => resetSupplyC(curve, outdoorC)),
+    );
+    const south = weather.latitudeDeg < 0;
+    const taps = this.taps.get(JSON.stringify([south, house.hotWater]), () => tapColumns(house, south));
+    return { windowSunW, supplySetC, ...taps };
+  }
+
+  private housePlan(house: House, design: Design) {
+    const heat = houseHeat(house);
+    const loop = emitterLoop(house, heat, design.supply);
+    const { floor, radiators, kind } = house.emitters;
+    const ideal = kind === 'ideal';
+    const hasFloor = !ideal && floor.areaM2 > 0;
+    const slabMm = floor.screedMm + SCREED_AROUND_PIPE_MM;
+    return {
+      network: {
+        floorAreaM2: house.floorAreaM2,
+        capacityClass: house.capacityClass,
+        opaqueWPerK: heat.opaqueWPerK,
+        windowWPerK: heat.windowWPerK,
+        slabCapacityJPerK: hasFloor ? slabCapacity(slabMm) * floor.areaM2 : 0,
+      },
+      ventilationWPerK: heat.ventilationWPerK,
+      windowOpening: house.windowOpening,
+      internalW: house.internalGainsW,
+      roomSetC: house.roomSetC,
+      staticLossWPerK: heat.totalWPerK,
+      ideal,
+      loopKgPerS: loop.loopKgPerS,
+      floorWPerK: hasFloor
+        ? supplyToSlabConductance(floor.areaM2, loop.floorKH, Math.max(NO_FLOW, loop.floorKgPerS) * CP)
+        : 0,
+      floorAreaM2: hasFloor ? floor.areaM2 : 0,
+      floorDownward: floor.downwardLoss,
+      radiatorRatedW: ideal ? 0 : radiators.ratedW,
+      radiatorExponent: radiators.exponent,
+      radiatorKgPerS: loop.radiatorKgPerS,
+      tapSetC: house.hotWater.setC,
+      exchangerEffectiveness: house.hotWater.exchangerEffectiveness,
+      ratedW: house.backup.ratedW,
+    };
+  }
+}
+
+/** Sun accepted by the optics in hour `h`: Kb Gb + Kd (Gd + Gr) [W/m²]. */
+function accepted(plane: PlaneYear, collector: Collector, h: number): number {
+  const { b0, diffuseModifier } = collector.curve;
+  const beam = plane.beamWm2[h]!;
+  const rest = diffuseModifier * (plane.diffuseWm2[h]! + plane.groundWm2[h]!);
+  return beam > 0 ? rest + beam * beamModifier(b0, Math.cos(toRadians(plane.incidenceDeg[h]!))) : rest;
+}
+
+function windowSun(site: SiteCache, house: House, model: SkyModel): Float64Array {
+  const gain = new Float64Array(HOURS_PER_YEAR);
+  for (const window of house.windows) {
+    const aperture = solarApertureM2(window.areaM2, window.frameFraction, window.gValue, window.shade);
+    const plane = site.plane({ tiltDeg: 90, azimuthDeg: window.azimuthDeg }, model);
+    for (let h = 0; h < HOURS_PER_YEAR; h++) gain[h]! += aperture * plane.totalWm2[h]!;
+  }
+  return gain;
+}
+
+function tapColumns(house: House, south: boolean): { tapKgPerS: Float64Array; mainsC: Float64Array } {
+  const { litresPerDay, profile, mainsMeanC, mainsAmplitudeK } = house.hotWater;
+  const shares = tappingShares(profile);
+  const tapKgPerS = new Float64Array(HOURS_PER_YEAR);
+  const mains = new Float64Array(HOURS_PER_YEAR);
+  for (let h = 0; h < HOURS_PER_YEAR; h++) {
+    const day = Math.floor(h / HOURS_PER_DAY);
+    tapKgPerS[h] = (litresPerDay * WATER_KG_PER_L * shares[h % HOURS_PER_DAY]!) / SECONDS_PER_HOUR;
+    mains[h] = mainsC(mainsMeanC, mainsAmplitudeK, day + 1, south);
+  }
+  return { tapKgPerS, mainsC: mains };
+}
+
+function mountedHours(months: readonly boolean[]): Uint8Array {
+  const mounted = new Uint8Array(HOURS_PER_YEAR);
+  for (let h = 0; h < HOURS_PER_YEAR; h++) mounted[h] = months[monthOf(h)] ? 1 : 0;
+  return mounted;
+}
+
+function boreSectionM2(boreMm: number): number {
+  return 0.25 * Math.PI * (boreMm / MM_PER_M) ** 2;
+}
+
+function arrayInput(design: Design): Plan['array'] {
+  const { array, collector, controller } = design;
+  const areaM2 = array.areaM2 * collector.widthFactor;
+  const pipeWaterL = 2 * array.pipeLengthM * boreSectionM2(array.pipeBoreMm) * L_PER_M3;
+  return {
+    areaM2,
+    a2: collector.curve.a2,
+    dryCapacityJPerK: collector.curve.dryCapacityJPerM2K * areaM2,
+    waterKg:
+      array.areaM2 > 0 ? (collector.curve.waterContentLPerM2 * areaM2 + pipeWaterL) * WATER_KG_PER_L : 0,
+    pipeCapacityJPerK: 2 * array.pipeLengthM * array.pipeCapacityJPerMK,
+    pipeLossWPerK: array.pipeLengthM * array.pipeLossWPerMK,
+    flowKgPerS: array.flowKgPerSM2 * array.areaM2,
+    startK: controller.startK,
+    stopK: controller.stopK,
+    inhibitC: controller.inhibitC,
+    minimumRunS: controller.minimumRunS,
+  };
+}
+
+/** Electric power of the running pump: vented return, so the lift is paid all the time [W]. */
+function pumpPowerW(array: CollectorArray): number {
+  const flowKgPerS = array.flowKgPerSM2 * array.areaM2;
+  const density = waterDensity(FRICTION_WATER_C);
+  const pressurePa = pressureDropPa(
+    {
+      lengthM: 2 * array.pipeLengthM,
+      boreM: array.pipeBoreMm / MM_PER_M,
+      roughnessM: PIPE_ROUGHNESS_M,
+      fittings: LOOP_FITTINGS,
+    },
+    flowKgPerS / density,
+    { density, viscosity: waterViscosity(FRICTION_WATER_C) },
+  );
+  const headM = runningHeadM(array.liftM, frictionHeadM(pressurePa, density), false);
+  return liftPowerW(flowKgPerS, headM, array.pumpEfficiency);
+}

@@ -1,0 +1,70 @@
+/**
+ * Everything that the year loop reads, flattened into typed arrays and plain numbers. A plan is built once per
+ * change of inputs (`build-plan.ts`); the loop itself knows neither designs nor weather files.
+ */
+import type { NetworkInput } from '@/lib/physics/house-network';
+import type { ArrayLoopInput } from './array-loop';
+
+/** Hourly columns of 8,760 values. */
+export interface PlanColumns {
+  /** outdoor air, mean of the hour [°C] */
+  outdoorC: Float64Array;
+  /** sun absorbed by the collector at its curve, all terms that do not depend on its temperature [W/m²] */
+  absorbedWm2: Float64Array;
+  /** linear loss with its wind term [W/(m²K)] */
+  a1: Float64Array;
+  /** irradiance on the plane of the array [W/m²] */
+  planeWm2: Float64Array;
+  /** 1 while the array hangs outside */
+  mounted: Uint8Array;
+  /** sun through the windows [W] */
+  windowSunW: Float64Array;
+  /** set supply of the emitter loop [°C] */
+  supplySetC: Float64Array;
+  /** tapped water at the tap's set temperature [kg/s] */
+  tapKgPerS: Float64Array;
+  mainsC: Float64Array;
+}
+
+export interface Plan {
+  columns: PlanColumns;
+  theta: number;
+  /** sub-steps after which the run is given up */
+  subStepCap: number;
+
+  /** false without an array in any month: then the store is not there either */
+  hasArray: boolean;
+  array: ArrayLoopInput;
+  storeLimitC: number;
+  pumpW: number;
+
+  layers: number;
+  storeKg: number;
+  storeLossWPerK: Float64Array;
+  conductionWPerK: number;
+  storeRoomC: number;
+  storeInside: boolean;
+
+  network: NetworkInput;
+  ventilationWPerK: number;
+  windowOpening: boolean;
+  internalW: number;
+  roomSetC: number;
+  /** static loss of the house, for the size of unmet heat [W/K] */
+  staticLossWPerK: number;
+
+  /** heat straight to the air node with ideal set point instead of emitters */
+  ideal: boolean;
+  loopKgPerS: number;
+  /** supply water to slab, upward part [W/K] */
+  floorWPerK: number;
+  floorAreaM2: number;
+  floorDownward: number;
+  radiatorRatedW: number;
+  radiatorExponent: number;
+  radiatorKgPerS: number;
+
+  tapSetC: number;
+  exchangerEffectiveness: number;
+  ratedW: number;
+}

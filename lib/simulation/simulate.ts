@@ -1,0 +1,85 @@
+import type { WeatherYear } from '@/lib/weather/weather-year';
+import type { Design, House, Numerics } from './design';
+import { assembleResult } from './assemble-result';
+import { PlanBuilder } from './build-plan';
+import type { Plan } from './plan';
+import type { YearResult } from './results';
+import { createColumns, Tally } from './tally';
+import { runYear, YearState, type YearStatus } from './year';
+
+export interface SimulationInput {
+  weather: WeatherYear;
+  house: House;
+  design: Design;
+  numerics: Numerics;
+}
+
+export type YearOutcome =
+  { ok: true; result: YearResult } | { ok: false; code: 'too stiff' | 'not finite'; message: string };
+
+/** Need of the house without sun and store, kept while house and supply stay as they are. */
+export interface ReferenceNeed {
+  needKwh: number;
+  unmetKwh: number;
+}
+
+const MESSAGES: Record<Exclude<YearStatus, 'done'>, string> = {
+  'too stiff':
+    'This design switches or flushes its store too often to be worked within its time. Choose a larger store, fewer layers or a smaller flow.',
+  'not finite':
+    'The figures of this design ran out of bounds. Look for an input that is far from the others, such as a very small heat capacity.',
+};
+
+export interface Simulator {
+  /** Runs the year of one design; caches of site, planes, dry hours and reference house are kept between runs. */
+  run(input: SimulationInput): YearOutcome;
+}
+
+/** Runs a pre-year that sets the initial state, then the year that is booked (model.md section 12: one pre-run year). */
+export function runPlan(plan: Plan, tally: Tally): { status: YearStatus; state: YearState } {
+  const state = new YearState(plan);
+  let status = runYear(plan, state, tally);
+  if (status === 'done') status = runYear(plan, state, tally);
+  return { status, state };
+}
+
+/**
+ * A simulator for one thread.
+ * @returns simulator; same inputs give the same digits, whatever ran before
+ */
+export function createSimulator(): Simulator {
+  const builder = new PlanBuilder();
+  const references = new Map<string, ReferenceNeed>();
+
+  function reference(input: SimulationInput): ReferenceNeed | YearStatus {
+    const key = builder.referenceKey(input);
+    const kept = references.get(key);
+    if (kept) return kept;
+    const plan = builder.referencePlan(input);
+    const tally = new Tally(plan.layers);
+    const { status } = runPlan(plan, tally);
+    if (status !== 'done') return status;
+    const need = tally.need();
+    if (references.size > 20) references.clear();
+    references.set(key, need);
+    return need;
+  }
+
+  return {
+    run(input) {
+      const need = reference(input);
+      if (typeof need === 'string') return failure(need);
+      const plan = builder.plan(input);
+      const tally = new Tally(plan.layers);
+      tally.columns = createColumns(plan.layers);
+      const { status, state } = runPlan(plan, tally);
+      if (status !== 'done') return failure(status);
+      return { ok: true, result: assembleResult(input, plan, state, tally, need, builder.dry(input)) };
+    },
+  };
+}
+
+function failure(status: YearStatus): YearOutcome {
+  const code = status === 'done' ? 'not finite' : status;
+  return { ok: false, code, message: MESSAGES[code] };
+}

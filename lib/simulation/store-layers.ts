@@ -1,0 +1,250 @@
+/**
+ * The layered store while it is being worked: N layers of equal mass, net flows at the interfaces, upwind,
+ * conduction, losses by layer; advanced by two-stage Heun steps; inversions merged after each step.
+ *
+ * The water of the array and its outdoor pipes stands in the bottom layer while the array is empty: filling
+ * and draining move that mass, so that heat and water are conserved exactly.
+ *
+ * @see Duffie & Beckman, Solar Engineering of Thermal Processes, 4th ed. 2013, sec. 8.4 (layered store);
+ *      net-flow form and numerics: model.md section 7 of the method pages
+ */
+
+import { WATER_SPECIFIC_HEAT_J_PER_KG_K as CP } from '@/lib/physics/water';
+
+/** What flows through the store during one sub-step; set by the loops, read by `advance`. */
+export class StoreFlows {
+  /** charging flow [kg/s], enters at `chargeLevel` with `chargeC`, leaves from the bottom */
+  chargeKgPerS = 0.0;
+  chargeC = 0.5;
+  chargeLevel = 0;
+  /** heating draw from the top [kg/s], comes back with `returnC` into `returnLevel` */
+  heatingKgPerS = 0.0;
+  returnC = 0.5;
+  returnLevel = 0;
+  /** preheat draw from the top back to the bottom [kg/s] */
+  tapKgPerS = 0.0;
+  mainsC = 0.5;
+  effectiveness = 0.5;
+}
+
+export class StoreLayers {
+  readonly count: number;
+  /** temperature of each layer, top first [°C] */
+  readonly t: Float64Array;
+  private readonly predicted: Float64Array;
+  private readonly rate: Float64Array;
+  private readonly rate2: Float64Array;
+  /** loss of each layer [W/K] */
+  readonly lossWPerK: Float64Array;
+  private readonly mergedMass: Float64Array;
+  private readonly mergedT: Float64Array;
+  private readonly mergedCount: Int32Array;
+  readonly layerKg: number;
+  /** mass of the bottom layer: more while the array is empty [kg] */
+  bottomKg: number;
+  private readonly conductionKgPerS: number;
+  roomC: number;
+  readonly flows = new StoreFlows();
+
+  /** mean top and bottom temperature of the last sub-step [°C], with which its energies are booked */
+  topMeanC = 0.5;
+  bottomMeanC = 0.5;
+  /** heat lost to the room in the last sub-step [J] */
+  lossJ = 0.5;
+
+  /**
+   * @param count N [-] 1..12
+   * @param massKg water while the array is full [kg]
+   * @param lossWPerK loss of each layer [W/K]
+   * @param conductionWPerK vertical conduction between neighbouring layers [W/K]
+   * @param roomC room of the store [°C]
+   */
+  constructor(
+    count: number,
+    massKg: number,
+    lossWPerK: Float64Array,
+    conductionWPerK: number,
+    roomC: number,
+  ) {
+    this.count = count;
+    this.t = new Float64Array(count);
+    this.predicted = new Float64Array(count);
+    this.rate = new Float64Array(count);
+    this.rate2 = new Float64Array(count);
+    this.mergedMass = new Float64Array(count);
+    this.mergedT = new Float64Array(count);
+    this.mergedCount = new Int32Array(count);
+    this.lossWPerK = lossWPerK;
+    this.layerKg = massKg / count;
+    this.bottomKg = this.layerKg;
+    this.conductionKgPerS = conductionWPerK / CP;
+    this.roomC = roomC;
+  }
+
+  get topC(): number {
+    return this.t[0]!;
+  }
+
+  get bottomC(): number {
+    return this.t[this.count - 1]!;
+  }
+
+  /** First layer from the top that is not warmer than the entering water, else the bottom. */
+  levelFor(enteringC: number): number {
+    const t = this.t;
+    const last = this.count - 1;
+    let i = 0;
+    while (i < last && t[i]! > enteringC) i++;
+    return i;
+  }
+
+  /** Longest stable sub-step of the given flows [s]: θ · layer mass / largest flow. */
+  stepLimitS(theta: number): number {
+    const f = this.flows;
+    const largest = Math.max(f.chargeKgPerS, f.heatingKgPerS + f.tapKgPerS);
+    return largest > 0 ? (theta * this.layerKg) / largest : Infinity;
+  }
+
+  /** Rates of change [K/s] of all layers at temperatures `t` into `out`. */
+  private rates(t: Float64Array, out: Float64Array): void {
+    const f = this.flows;
+    const last = this.count - 1;
+    const charge = f.chargeKgPerS;
+    const heating = f.heatingKgPerS;
+    const tap = f.tapKgPerS;
+    const conduction = this.conductionKgPerS;
+    const loss = this.lossWPerK;
+    const room = this.roomC;
+    const perLayer = 1 / this.layerKg;
+    const perLayerHeat = perLayer / CP;
+    const top = t[0]!;
+    let above = -(heating + tap) * top;
+    for (let i = 0; i < last; i++) {
+      const here = t[i]!;
+      const below = t[i + 1]!;
+      let flow = -tap;
+      if (f.chargeLevel <= i) flow += charge;
+      if (f.returnLevel > i) flow -= heating;
+      const down = (flow > 0 ? flow * here : flow * below) + conduction * (here - below);
+      out[i] = (above - down) * perLayer - loss[i]! * (here - room) * perLayerHeat;
+      above = down;
+    }
+    const bottom = t[last]!;
+    const tapReturn = top - f.effectiveness * (top - f.mainsC);
+    const net = above - charge * bottom + tap * tapReturn;
+    out[last] = (net - (loss[last]! * (bottom - room)) / CP) / this.bottomKg;
+    out[f.chargeLevel]! += (charge * f.chargeC) / (f.chargeLevel === last ? this.bottomKg : this.layerKg);
+    out[f.returnLevel]! += (heating * f.returnC) / (f.returnLevel === last ? this.bottomKg : this.layerKg);
+  }
+
+  /** First stage: rates at the present temperatures and the predicted temperatures after `dtS`. */
+  predict(dtS: number): void {
+    this.rates(this.t, this.rate);
+    for (let i = 0; i < this.count; i++) this.predicted[i] = this.t[i]! + dtS * this.rate[i]!;
+    const last = this.count - 1;
+    this.topMeanC = 0.5 * (this.t[0]! + this.predicted[0]!);
+    this.bottomMeanC = 0.5 * (this.t[last]! + this.predicted[last]!);
+  }
+
+  /**
+   * Second stage. The charging water of the first stage came with `firstChargeC`; both stages are booked with
+   * the final `flows.chargeC`, so that the heat given is that of the array.
+   */
+  correct(dtS: number, firstChargeC: number): void {
+    const f = this.flows;
+    const last = this.count - 1;
+    this.rates(this.predicted, this.rate2);
+    const shift = f.chargeKgPerS * (f.chargeC - firstChargeC);
+    if (shift !== 0) {
+      this.rate[f.chargeLevel]! += shift / (f.chargeLevel === last ? this.bottomKg : this.layerKg);
+    }
+    const half = 0.5 * dtS;
+    const room = this.roomC;
+    let lost = 0;
+    let sorted = true;
+    let warmer = Infinity;
+    for (let i = 0; i <= last; i++) {
+      const before = this.t[i]!;
+      lost += this.lossWPerK[i]! * (0.5 * (before + this.predicted[i]!) - room);
+      const next = before + half * (this.rate[i]! + this.rate2[i]!);
+      this.t[i] = next;
+      if (next > warmer) sorted = false;
+      warmer = next;
+    }
+    this.lossJ = lost * dtS;
+    if (!sorted) this.mergeInversions();
+  }
+
+  /** Mixes layers that lie under colder ones, from the unstable pair outward (pool adjacent violators). */
+  mergeInversions(): void {
+    const mass = this.mergedMass;
+    const temperature = this.mergedT;
+    const counts = this.mergedCount;
+    const last = this.count - 1;
+    let blocks = 0;
+    for (let i = 0; i <= last; i++) {
+      let m = i === last ? this.bottomKg : this.layerKg;
+      let t = this.t[i]!;
+      let n = 1;
+      while (blocks > 0 && temperature[blocks - 1]! < t) {
+        blocks--;
+        const sum = mass[blocks]! + m;
+        t = (temperature[blocks]! * mass[blocks]! + t * m) / sum;
+        m = sum;
+        n += counts[blocks]!;
+      }
+      mass[blocks] = m;
+      temperature[blocks] = t;
+      counts[blocks] = n;
+      blocks++;
+    }
+    let i = 0;
+    for (let b = 0; b < blocks; b++) {
+      for (let k = counts[b]!; k > 0; k--) this.t[i++] = temperature[b]!;
+    }
+  }
+
+  /** Takes water from the bottom layer without changing its temperature [kg]. */
+  takeFromBottom(kg: number): void {
+    this.bottomKg -= kg;
+  }
+
+  /** Takes heat out of the bottom layer [J]. */
+  coolBottom(heatJ: number): void {
+    this.t[this.count - 1]! -= heatJ / (this.bottomKg * CP);
+    this.settle();
+  }
+
+  /** Brings water home into its level; the layers below move down and the bottom layer grows [kg, °C]. */
+  bringHome(kg: number, waterC: number): void {
+    const last = this.count - 1;
+    const level = this.levelFor(waterC);
+    const parts = Math.max(1, Math.ceil((2 * kg) / this.layerKg));
+    const part = kg / parts;
+    for (let p = 0; p < parts; p++) {
+      const bottomInflowC = level === last ? waterC : this.t[last - 1]!;
+      const share = part / this.layerKg;
+      this.t[last] = (this.t[last]! * this.bottomKg + bottomInflowC * part) / (this.bottomKg + part);
+      this.bottomKg += part;
+      for (let i = last - 1; i > level; i--) this.t[i]! += share * (this.t[i - 1]! - this.t[i]!);
+      if (level < last) this.t[level]! += share * (waterC - this.t[level]!);
+    }
+    this.settle();
+  }
+
+  private settle(): void {
+    for (let i = 1; i < this.count; i++) {
+      if (this.t[i]! > this.t[i - 1]!) {
+        this.mergeInversions();
+        return;
+      }
+    }
+  }
+
+  /** Heat held above 0 °C [J]. */
+  heatJ(): number {
+    let sum = 0;
+    for (let i = 0; i < this.count - 1; i++) sum += this.t[i]! * this.layerKg;
+    return (sum + this.t[this.count - 1]! * this.bottomKg) * CP;
+  }
+}

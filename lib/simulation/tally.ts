@@ -1,0 +1,268 @@
+import type { HouseNetwork } from '@/lib/physics/house-network';
+import { HOURS_PER_YEAR, KWH_PER_J, MONTH_START_HOUR, SECONDS_PER_HOUR } from '@/lib/units/constants';
+import type { ArrayLoop } from './array-loop';
+import type { Plan } from './plan';
+import type { HourColumns } from './results';
+import type { YearState } from './year';
+
+/** Sums per month [J], in the order of one row of `monthJ`. */
+export const MONTH_FIELDS = [
+  'heating',
+  'tap',
+  'solarHeating',
+  'solarTap',
+  'backupHeating',
+  'backupTap',
+  'unmet',
+  'collected',
+  'plane',
+  'storeLoss',
+  'pipeLoss',
+  'unused',
+  'pumpS',
+  'starts',
+  'outdoorCS',
+] as const;
+export type MonthField = (typeof MONTH_FIELDS)[number];
+const WIDTH = MONTH_FIELDS.length;
+
+/** Allocates the hourly columns of a year. */
+export function createColumns(layers: number): HourColumns {
+  const column = () => new Float32Array(HOURS_PER_YEAR);
+  return {
+    outdoorC: column(),
+    planeWm2: column(),
+    arrayW: column(),
+    pumpShare: column(),
+    arrayC: column(),
+    solarHeatingW: column(),
+    solarTapW: column(),
+    backupHeatingW: column(),
+    backupTapW: column(),
+    unmetW: column(),
+    storeTopC: column(),
+    storeBottomC: column(),
+    storeLayersC: new Float32Array(HOURS_PER_YEAR * layers),
+    roomC: column(),
+    floorSurfaceC: column(),
+    supplyC: column(),
+    returnC: column(),
+    dryPlateC: column(),
+    dryCoverC: column(),
+    dryBackC: column(),
+    carrier: new Uint8Array(HOURS_PER_YEAR),
+    overLimit: new Uint8Array(HOURS_PER_YEAR),
+  };
+}
+
+/** Books one year while it runs: hourly columns as 32-bit floats, every sum in double precision. */
+export class Tally {
+  columns: HourColumns;
+  readonly monthJ = new Float64Array(12 * WIDTH);
+
+  // heat of the whole year [J]
+  arraySunJ = 0;
+  arrayLossJ = 0;
+  pipeLossJ = 0;
+  storeLossJ = 0;
+  backupJ = 0;
+  windowSunJ = 0;
+  internalJ = 0;
+  ventilationJ = 0;
+  transmissionJ = 0;
+  windowRelossJ = 0;
+  downwardJ = 0;
+  tapJ = 0;
+  dismountedJ = 0;
+  /** stored heat at the start and change over the year [J] */
+  readonly startJ = new Float64Array(4);
+  readonly changeJ = new Float64Array(4);
+
+  starts = 0;
+  coldestInletC = Infinity;
+  plateMaxC = -Infinity;
+
+  private hourStarts = 0;
+  private givenJ = 0;
+  private hourPipeJ = 0;
+  private pumpS = 0;
+  private unusedJ = 0;
+  private heatingJ = 0;
+  private hourTapJ = 0;
+  private solarHeatingJ = 0;
+  private solarTapJ = 0;
+  private backupHeatingJ = 0;
+  private backupTapJ = 0;
+  private unmetJ = 0;
+  private hourStoreLossJ = 0;
+
+  constructor(layers: number) {
+    this.columns = createColumns(layers);
+  }
+
+  /** Clears everything for a new year and notes the heat stored at its start. */
+  begin(state: YearState): void {
+    this.monthJ.fill(0);
+    this.arraySunJ = this.arrayLossJ = this.pipeLossJ = this.storeLossJ = this.backupJ = 0;
+    this.windowSunJ = this.internalJ = this.ventilationJ = this.transmissionJ = this.windowRelossJ = 0;
+    this.downwardJ = this.tapJ = this.dismountedJ = 0;
+    this.starts = this.hourStarts = 0;
+    this.coldestInletC = Infinity;
+    this.plateMaxC = -Infinity;
+    this.noteStored(state, this.startJ);
+  }
+
+  /** Notes the change of stored heat at the end of the year. */
+  end(state: YearState): void {
+    this.noteStored(state, this.changeJ);
+    for (let i = 0; i < 4; i++) this.changeJ[i]! -= this.startJ[i]!;
+  }
+
+  /** Heat given to rooms and taps, and what was missing [kWh]. */
+  need(): { needKwh: number; unmetKwh: number } {
+    let need = 0;
+    let unmet = 0;
+    for (let month = 0; month < 12; month++) {
+      need += monthSum(this.monthJ, month, 'heating') + monthSum(this.monthJ, month, 'tap');
+      unmet += monthSum(this.monthJ, month, 'unmet');
+    }
+    return { needKwh: need * KWH_PER_J, unmetKwh: unmet * KWH_PER_J };
+  }
+
+  private noteStored(state: YearState, into: Float64Array): void {
+    const pipes = state.loop.input.pipeCapacityJPerK * state.loop.pipeC;
+    into[0] = state.loop.heatJ() - pipes;
+    into[1] = pipes;
+    into[2] = state.store.heatJ();
+    into[3] = state.network.heatJ();
+  }
+
+  /** Books a sub-step of the array. */
+  book(loop: ArrayLoop, sunJ: number, runningS: number): void {
+    this.arraySunJ += sunJ;
+    this.arrayLossJ += loop.arrayLossJ;
+    this.hourPipeJ += loop.pipeLossJ;
+    this.givenJ += loop.givenJ;
+    this.pumpS += runningS;
+  }
+
+  /** Books what the array could have given at the bottom temperature while the store was locked. */
+  bookUnused(
+    areaM2: number,
+    absorbedWm2: number,
+    a1: number,
+    a2: number,
+    excessK: number,
+    dtS: number,
+  ): void {
+    const power = absorbedWm2 - a1 * excessK - a2 * excessK * Math.abs(excessK);
+    if (power > 0) this.unusedJ += areaM2 * power * dtS;
+  }
+
+  /** Books one outer step of house, taps and backup [W over `stepS`]. */
+  bookStep(
+    network: HouseNetwork,
+    outdoorC: number,
+    relossW: number,
+    solarHeatingW: number,
+    solarTapW: number,
+    backupHeatingW: number,
+    backupTapW: number,
+    tapLoadW: number,
+    unmetW: number,
+    downwardW: number,
+    storeLossW: number,
+    stepS: number,
+  ): void {
+    this.solarHeatingJ += solarHeatingW * stepS;
+    this.solarTapJ += solarTapW * stepS;
+    this.backupHeatingJ += backupHeatingW * stepS;
+    this.backupTapJ += backupTapW * stepS;
+    this.heatingJ += (solarHeatingW + backupHeatingW) * stepS;
+    this.hourTapJ += tapLoadW * stepS;
+    this.unmetJ += unmetW * stepS;
+    this.hourStoreLossJ += storeLossW * stepS;
+    this.tapJ += (solarTapW + backupTapW) * stepS;
+    this.ventilationJ += network.hVe * (network.airC - outdoorC) * stepS;
+    this.transmissionJ +=
+      (network.hW * (network.surfaceC - outdoorC) + network.hEm * (network.massMeanC - outdoorC)) * stepS;
+    this.windowRelossJ += relossW * stepS;
+    this.downwardJ += downwardW * stepS;
+  }
+
+  /** Writes the hour's columns and adds its sums to month and year. */
+  closeHour(
+    h: number,
+    state: YearState,
+    plan: Plan,
+    supplySum: number,
+    returnSum: number,
+    dutySum: number,
+  ): void {
+    const c = this.columns;
+    const perHour = 1 / SECONDS_PER_HOUR;
+    const outdoorC = plan.columns.outdoorC[h]!;
+    c.outdoorC[h] = outdoorC;
+    c.planeWm2[h] = plan.columns.planeWm2[h]!;
+    c.arrayW[h] = this.givenJ * perHour;
+    c.pumpShare[h] = this.pumpS * perHour;
+    c.arrayC[h] = state.mounted ? state.loop.arrayC : outdoorC;
+    c.solarHeatingW[h] = this.solarHeatingJ * perHour;
+    c.solarTapW[h] = this.solarTapJ * perHour;
+    c.backupHeatingW[h] = this.backupHeatingJ * perHour;
+    c.backupTapW[h] = this.backupTapJ * perHour;
+    c.unmetW[h] = this.unmetJ * perHour;
+    c.storeTopC[h] = state.store.topC;
+    c.storeBottomC[h] = state.store.bottomC;
+    const layers = state.store.count;
+    for (let i = 0; i < layers; i++) c.storeLayersC[i * HOURS_PER_YEAR + h] = state.store.t[i]!;
+    c.roomC[h] = state.network.airC;
+    c.floorSurfaceC[h] = plan.floorWPerK > 0 ? state.network.slabC : state.network.airC;
+    c.supplyC[h] = dutySum > 0 ? supplySum / dutySum : NaN;
+    c.returnC[h] = dutySum > 0 ? returnSum / dutySum : NaN;
+
+    const planeJ = state.mounted ? plan.columns.planeWm2[h]! * plan.array.areaM2 * SECONDS_PER_HOUR : 0;
+    const m = this.monthJ;
+    const row = monthOf(h) * WIDTH;
+    m[row]! += this.heatingJ;
+    m[row + 1]! += this.hourTapJ;
+    m[row + 2]! += this.solarHeatingJ;
+    m[row + 3]! += this.solarTapJ;
+    m[row + 4]! += this.backupHeatingJ;
+    m[row + 5]! += this.backupTapJ;
+    m[row + 6]! += this.unmetJ;
+    m[row + 7]! += this.givenJ;
+    m[row + 8]! += planeJ;
+    m[row + 9]! += this.hourStoreLossJ;
+    m[row + 10]! += this.hourPipeJ;
+    m[row + 11]! += this.unusedJ;
+    m[row + 12]! += this.pumpS;
+    m[row + 13]! += this.starts - this.hourStarts;
+    m[row + 14]! += outdoorC * SECONDS_PER_HOUR;
+
+    this.backupJ += this.backupHeatingJ + this.backupTapJ;
+    this.storeLossJ += this.hourStoreLossJ;
+    this.pipeLossJ += this.hourPipeJ;
+    this.windowSunJ += plan.columns.windowSunW[h]! * SECONDS_PER_HOUR;
+    this.internalJ += plan.internalW * SECONDS_PER_HOUR;
+    this.hourStarts = this.starts;
+    this.givenJ = this.hourPipeJ = this.pumpS = this.unusedJ = this.heatingJ = this.hourTapJ = 0;
+    this.solarHeatingJ = this.solarTapJ = this.backupHeatingJ = this.backupTapJ = 0;
+    this.unmetJ = this.hourStoreLossJ = 0;
+  }
+}
+
+const MONTH_OF_HOUR = new Uint8Array(HOURS_PER_YEAR);
+for (let month = 0; month < 12; month++) {
+  MONTH_OF_HOUR.fill(month, MONTH_START_HOUR[month]!, MONTH_START_HOUR[month + 1]!);
+}
+
+/** Month of an hour of the year, January = 0. */
+export function monthOf(hour: number): number {
+  return MONTH_OF_HOUR[hour]!;
+}
+
+/** One month's sum [J] (or [s], count, [°C s]). */
+export function monthSum(monthJ: Float64Array, month: number, field: MonthField): number {
+  return monthJ[month * WIDTH + MONTH_FIELDS.indexOf(field)]!;
+}

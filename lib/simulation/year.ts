@@ -1,0 +1,318 @@
+/**
+ * The year: 8,760 hours in outer steps of a quarter of an hour (house, thermostat, emitters, taps); inside each
+ * of them array and store advance by sub-steps that end at the next switch of the pump, at a share θ of a layer's
+ * flush, or at the end of the step. No allocation inside.
+ */
+import { HouseNetwork } from '@/lib/physics/house-network';
+import { floorSurfaceCoefficient } from '@/lib/physics/floor';
+import { radiatorHeat } from '@/lib/physics/radiator';
+import { WATER_SPECIFIC_HEAT_J_PER_KG_K as CP } from '@/lib/physics/water';
+import { HOURS_PER_YEAR, SECONDS_PER_HOUR } from '@/lib/units/constants';
+import { ArrayLoop } from './array-loop';
+import type { Plan } from './plan';
+import { StoreLayers } from './store-layers';
+import { Tally } from './tally';
+
+const STEPS_PER_HOUR = 4;
+const STEP_S = SECONDS_PER_HOUR / STEPS_PER_HOUR;
+/** Switches of the pump within one step after which its state is held to the end of the step. */
+const SWITCH_CAP = 60;
+const TIME_TOLERANCE_S = 1e-7;
+/** Windows are opened above this room temperature and then exchange four times the air. */
+const OPENING_C = 25;
+const OPENING_FACTOR = 4;
+/** Proportional band of the thermostat, ± half [K]. */
+const HALF_BAND_K = 0.5;
+const RADIATOR_TO_AIR = 0.7;
+/** Surplus of the store over the return that makes its draw worth while [K]. */
+const RETURN_MARGIN_K = 1;
+const UNLOCK_K = 2;
+
+export type YearStatus = 'done' | 'too stiff' | 'not finite';
+
+/** The bodies that carry heat from one hour to the next. */
+export class YearState {
+  readonly network: HouseNetwork;
+  readonly store: StoreLayers;
+  readonly loop: ArrayLoop;
+  locked = false;
+  mounted = false;
+  windowsOpen = false;
+  subSteps = 0;
+
+  constructor(plan: Plan) {
+    this.network = new HouseNetwork(plan.network);
+    this.network.reset(plan.roomSetC);
+    this.store = new StoreLayers(
+      plan.layers,
+      plan.storeKg,
+      plan.storeLossWPerK,
+      plan.conductionWPerK,
+      plan.storeRoomC,
+    );
+    this.store.t.fill(plan.roomSetC);
+    this.store.takeFromBottom(-plan.array.waterKg);
+    this.loop = new ArrayLoop(plan.array);
+    this.loop.arrayC = plan.columns.outdoorC[0]!;
+    this.loop.pipeC = plan.columns.outdoorC[0]!;
+  }
+}
+
+/**
+ * Runs one year from the given state and books it.
+ *
+ * @param plan what does not change
+ * @param state bodies at the start, moved to the end of the year
+ * @param tally columns and sums of this year, overwritten
+ * @returns 'done', or why the run was given up
+ */
+export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus {
+  const { network, store, loop } = state;
+  const flows = store.flows;
+  const columns = plan.columns;
+  const { theta, roomSetC, ratedW, hasArray, storeLimitC, loopKgPerS, floorWPerK } = plan;
+  const floorShareUp = 1 - plan.floorDownward;
+  const loopWPerK = loopKgPerS * CP;
+  const hasFloor = floorWPerK > 0;
+  const hasRadiators = plan.radiatorRatedW > 0;
+  const flowKgPerS = plan.array.flowKgPerS;
+  const areaM2 = plan.array.areaM2;
+  const storeInside = plan.storeInside;
+  tally.begin(state);
+  let subSteps = 0;
+  let storeLossW = 0;
+  flows.mainsC = columns.mainsC[0]!;
+  flows.effectiveness = plan.exchangerEffectiveness;
+
+  for (let h = 0; h < HOURS_PER_YEAR; h++) {
+    const outdoorC = columns.outdoorC[h]!;
+    const windowSunW = columns.windowSunW[h]!;
+    const internalW = plan.internalW;
+    const absorbedWm2 = columns.absorbedWm2[h]!;
+    loop.outdoorC = outdoorC;
+    loop.absorbedWm2 = absorbedWm2;
+    loop.a1 = columns.a1[h]!;
+
+    const mounted = hasArray && columns.mounted[h] === 1;
+    if (mounted !== state.mounted) {
+      if (loop.full) loop.drain(store);
+      tally.dismountedJ += loop.relax();
+      state.mounted = mounted;
+    }
+
+    if (plan.windowOpening) state.windowsOpen = network.airC > OPENING_C && outdoorC < network.airC;
+    const film = hasFloor ? plan.floorAreaM2 * floorSurfaceCoefficient(network.slabC - network.surfaceC) : 0;
+    const ventilation = state.windowsOpen ? OPENING_FACTOR * plan.ventilationWPerK : plan.ventilationWPerK;
+    network.prepare(ventilation, film, STEP_S);
+
+    const gains = 0.5 * internalW + windowSunW;
+    const gainToSurface = network.gainToSurface * gains;
+    const gainToMass = network.gainToMass * gains;
+    const gainToAir = 0.5 * internalW;
+    const heatingAllowed = outdoorC < roomSetC;
+
+    const setC = columns.supplySetC[h]!;
+    let radiatorWPerK = 0;
+    if (hasRadiators && heatingAllowed && setC > network.airC + 0.5) {
+      const full = radiatorHeat(
+        plan.radiatorRatedW,
+        plan.radiatorExponent,
+        setC,
+        plan.radiatorKgPerS * CP,
+        network.airC,
+      );
+      radiatorWPerK = full / (setC - network.airC);
+    }
+
+    const tapKgPerS = columns.tapKgPerS[h]!;
+    const mainsC = columns.mainsC[h]!;
+    const tapLoadW = tapKgPerS * CP * Math.max(0, plan.tapSetC - mainsC);
+    flows.mainsC = mainsC;
+    let supplySum = 0;
+    let returnSum = 0;
+    let dutySum = 0;
+
+    for (let step = 0; step < STEPS_PER_HOUR; step++) {
+      const toAir = storeInside ? gainToAir + storeLossW : gainToAir;
+      network.solve(outdoorC, outdoorC, toAir, gainToSurface, gainToMass, 0);
+
+      // thermostat: duty of the emitters at full flow and set supply, solved for the air of this step
+      let duty = 0;
+      let floorW = 0;
+      let radiatorW = 0;
+      let returnC = setC;
+      let supplyC = setC;
+      let demandW = 0;
+      if (heatingAllowed) {
+        if (plan.ideal) {
+          demandW = Math.min(ratedW, Math.max(0, (roomSetC - network.airC) / network.airRise(1, 0, 0)));
+        } else {
+          floorW = hasFloor ? Math.max(0, floorWPerK * (setC - network.slabC)) : 0;
+          radiatorW = Math.max(0, radiatorWPerK * (setC - network.airC));
+          const rise = network.airRise(
+            RADIATOR_TO_AIR * radiatorW,
+            (1 - RADIATOR_TO_AIR) * radiatorW,
+            floorW,
+          );
+          duty = Math.min(1, Math.max(0, (roomSetC + HALF_BAND_K - network.airC) / (2 * HALF_BAND_K + rise)));
+          let fullW = floorW / floorShareUp + radiatorW;
+          returnC = setC - fullW / loopWPerK;
+          const lift = ratedW / (duty * loopWPerK);
+          if (duty > 0 && store.topC + lift < setC && store.topC > returnC + RETURN_MARGIN_K) {
+            // the backup cannot lift the whole loop to its set supply: the supply stays where its power ends
+            supplyC = store.topC + lift;
+            floorW = hasFloor ? Math.max(0, floorWPerK * (supplyC - network.slabC)) : 0;
+            radiatorW = Math.max(0, radiatorWPerK * (supplyC - network.airC));
+            fullW = floorW / floorShareUp + radiatorW;
+            returnC = supplyC - fullW / loopWPerK;
+          }
+          demandW = duty * fullW;
+          supplySum += duty * supplyC;
+          returnSum += duty * returnC;
+          dutySum += duty;
+        }
+      }
+
+      // array and store
+      let rest = STEP_S;
+      let switches = 0;
+      let storeHeatJ = 0;
+      let tapHeatJ = 0;
+      let lossJ = 0;
+      while (rest > TIME_TOLERANCE_S) {
+        const topC = store.topC;
+        const held = switches >= SWITCH_CAP;
+        if (loop.full) {
+          const overLimit = topC > storeLimitC;
+          if (!held && (overLimit || loop.wantsStop(store.bottomC))) {
+            loop.drain(store);
+            if (overLimit) state.locked = true;
+            switches++;
+            continue;
+          }
+        } else if (state.locked) {
+          if (topC < storeLimitC - UNLOCK_K) state.locked = false;
+        } else if (topC > storeLimitC) state.locked = true;
+
+        let heatingKgPerS = 0;
+        if (hasArray && demandW > 0 && !plan.ideal) {
+          if (topC >= supplyC) heatingKgPerS = (duty * loopKgPerS * (supplyC - returnC)) / (topC - returnC);
+          else if (topC > returnC + RETURN_MARGIN_K) heatingKgPerS = duty * loopKgPerS;
+        }
+        let preheatKgPerS = 0;
+        if (hasArray && tapKgPerS > 0 && topC > mainsC) {
+          const preheatedK = flows.effectiveness * (topC - mainsC);
+          const wantedK = plan.tapSetC - mainsC;
+          preheatKgPerS = preheatedK > wantedK ? (tapKgPerS * wantedK) / preheatedK : tapKgPerS;
+        }
+        flows.heatingKgPerS = heatingKgPerS;
+        flows.tapKgPerS = preheatKgPerS;
+        flows.chargeKgPerS = loop.full ? flowKgPerS : 0;
+        let dt = Math.min(rest, store.stepLimitS(theta));
+
+        const bottomC = store.bottomC;
+        if (loop.full) {
+          loop.prepareRunning(bottomC);
+          if (!held) dt = Math.min(dt, loop.timeToStop(bottomC));
+        } else if (mounted) {
+          loop.prepareEmpty();
+          if (!state.locked && !held) {
+            const wait = loop.timeToStart(bottomC);
+            if (wait <= TIME_TOLERANCE_S) {
+              loop.fill(store);
+              tally.starts++;
+              switches++;
+              continue;
+            }
+            dt = Math.min(dt, wait);
+          }
+        }
+        if (dt < TIME_TOLERANCE_S) dt = Math.min(rest, 1e-3);
+
+        flows.returnC = returnC;
+        flows.returnLevel = heatingKgPerS > 0 ? store.levelFor(returnC) : 0;
+        if (loop.full) {
+          const firstC = loop.chargeC(dt, bottomC);
+          flows.chargeC = firstC;
+          flows.chargeLevel = store.levelFor(firstC);
+          store.predict(dt);
+          loop.shiftInlet(store.bottomMeanC - bottomC);
+          const chargeC = loop.chargeC(dt, store.bottomMeanC);
+          flows.chargeC = chargeC;
+          store.correct(dt, firstC);
+          loop.advanceRunning(dt, store.bottomMeanC, chargeC);
+          tally.book(loop, areaM2 * absorbedWm2 * dt, dt);
+          if (bottomC < tally.coldestInletC) tally.coldestInletC = bottomC;
+        } else {
+          flows.chargeLevel = 0;
+          store.predict(dt);
+          store.correct(dt, flows.chargeC);
+          if (mounted) {
+            loop.advanceEmpty(dt);
+            tally.book(loop, areaM2 * absorbedWm2 * dt, 0);
+            if (loop.arrayC > tally.plateMaxC) tally.plateMaxC = loop.arrayC;
+            if (state.locked)
+              tally.bookUnused(areaM2, absorbedWm2, loop.a1, plan.array.a2, bottomC - outdoorC, dt);
+          }
+        }
+        storeHeatJ += heatingKgPerS * CP * (store.topMeanC - returnC) * dt;
+        tapHeatJ += preheatKgPerS * CP * flows.effectiveness * (store.topMeanC - mainsC) * dt;
+        lossJ += store.lossJ;
+        rest -= dt;
+        subSteps++;
+      }
+
+      // what the store really gave, the backup on top of it, and the house
+      const storeW = storeHeatJ / STEP_S;
+      const tapStoreW = tapHeatJ / STEP_S;
+      const tapBackupW = Math.min(ratedW, Math.max(0, tapLoadW - tapStoreW));
+      const tapShortW = Math.max(0, tapLoadW - tapStoreW - tapBackupW);
+      const backupW = Math.min(Math.max(0, ratedW - tapBackupW), Math.max(0, demandW - storeW));
+      const givenW = storeW + backupW;
+      storeLossW = lossJ / STEP_S;
+      const insideW = storeInside ? storeLossW : 0;
+      let downwardW = 0;
+      if (plan.ideal) {
+        network.solve(outdoorC, outdoorC, gainToAir + insideW + givenW, gainToSurface, gainToMass, 0);
+      } else if (givenW > 0) {
+        const scale = demandW > 0 ? (duty * givenW) / demandW : 0;
+        const upW = scale * floorW;
+        const radW = scale * radiatorW;
+        downwardW = givenW - upW - radW;
+        network.solve(
+          outdoorC,
+          outdoorC,
+          gainToAir + insideW + RADIATOR_TO_AIR * radW,
+          gainToSurface + (1 - RADIATOR_TO_AIR) * radW,
+          gainToMass,
+          upW,
+        );
+      } else if (storeInside) {
+        network.solve(outdoorC, outdoorC, gainToAir + insideW, gainToSurface, gainToMass, 0);
+      }
+      network.advance();
+      const lacking = heatingAllowed ? roomSetC - HALF_BAND_K - 1e-6 - network.airC : 0;
+      const unmetW = tapShortW + (lacking > 0 ? lacking * plan.staticLossWPerK : 0);
+      tally.bookStep(
+        network,
+        outdoorC,
+        gains * network.gainLost,
+        storeW,
+        tapStoreW,
+        backupW,
+        tapBackupW,
+        tapLoadW,
+        unmetW,
+        downwardW,
+        storeLossW,
+        STEP_S,
+      );
+    }
+    tally.closeHour(h, state, plan, supplySum, returnSum, dutySum);
+    if (subSteps > plan.subStepCap) return 'too stiff';
+    if (!(network.airC > -200 && store.topC > -200 && store.topC < 1000)) return 'not finite';
+  }
+  state.subSteps = subSteps;
+  tally.end(state);
+  return 'done';
+}
