@@ -18,7 +18,19 @@ export interface SkyMoment {
   zenithDeg: number;
   /** cos θ on the plane, negative behind it */
   cosIncidence: number;
-  tiltDeg: number;
+  tilt: TiltFactors;
+}
+
+/** What a plane's tilt does to sky and ground; the same for every hour of a year. */
+export interface TiltFactors {
+  /** part of the sky that the plane sees, (1 + cos β)/2 */
+  skyView: number;
+  /** (1 − cos β)/2 */
+  groundView: number;
+  /** sin β */
+  sine: number;
+  /** sin³(β/2) */
+  halfSineCubed: number;
 }
 
 /** Diffuse of the sky on the plane: what comes from around the sun, and the rest. */
@@ -84,25 +96,21 @@ export function brighteningFactor(beamHorizontal: number, global: number): numbe
 }
 
 /**
- * Part of the sky that the plane sees: (1 + cos β)/2.
- * @param tiltDeg β [°] 0…180
- * @returns view factor [-] 0…1
- * @see B. Y. H. Liu & R. C. Jordan, The long-term average performance of flat-plate solar-energy collectors, Solar Energy 7 (1963) 53
+ * View factors of a tilted plane: (1 + cos β)/2 to the sky, (1 − cos β)/2 to the ground; sin β, sin³(β/2).
+ * @param tiltDeg β from the horizontal [°] 0…180
+ * @returns factors [-]
+ * @see B. Y. H. Liu & R. C. Jordan, The long-term average performance of flat-plate solar-energy collectors,
+ *   Solar Energy 7 (1963) 53
  */
-export function skyViewFactor(tiltDeg: number): number {
-  return (1 + Math.cos(toRadians(tiltDeg))) / 2;
-}
-
-/**
- * Light from the ground on the plane: Gr = G ρ (1 − cos β)/2.
- * @param global G on the horizontal, any unit
- * @param albedo ρ [-] 0…1
- * @param tiltDeg β [°] 0…180
- * @returns Gr in the unit of G
- * @see B. Y. H. Liu & R. C. Jordan, Solar Energy 7 (1963) 53
- */
-export function groundReflected(global: number, albedo: number, tiltDeg: number): number {
-  return global * albedo * (1 - skyViewFactor(tiltDeg));
+export function tiltFactors(tiltDeg: number): TiltFactors {
+  const beta = toRadians(tiltDeg);
+  const skyView = (1 + Math.cos(beta)) / 2;
+  return {
+    skyView,
+    groundView: 1 - skyView,
+    sine: Math.sin(beta),
+    halfSineCubed: Math.pow(Math.sin(beta / 2), 3),
+  };
 }
 
 /**
@@ -118,27 +126,26 @@ export function groundReflected(global: number, albedo: number, tiltDeg: number)
  *   all in Duffie & Beckman 2013, sec. 2.15-2.16
  */
 export function skyOnPlane(model: SkyModel, sky: SkyMoment, airMassValue?: number): SkyOnPlane {
-  const view = skyViewFactor(sky.tiltDeg);
+  const view = sky.tilt.skyView;
   if (sky.diffuse <= 0) return { circumsolar: 0, rest: 0 };
   if (model === 'isotropic') return { circumsolar: 0, rest: sky.diffuse * view };
-  if (model === 'perez') return perezOnPlane(sky, view, airMassValue ?? airMass(sky.zenithDeg));
+  if (model === 'perez') return perezOnPlane(sky, airMassValue ?? airMass(sky.zenithDeg));
   const ai = anisotropyIndex(sky.beamNormal, sky.extraterrestrialNormal);
   const circumsolar = sky.diffuse * ai * beamRatio(sky.cosIncidence, sky.cosZenith);
   const background = sky.diffuse * (1 - ai) * view;
   if (model === 'hay-davies') return { circumsolar, rest: background };
   const f = brighteningFactor(sky.beamNormal * sky.cosZenith, sky.global);
-  const halfSine = Math.sin(toRadians(sky.tiltDeg / 2));
-  return { circumsolar, rest: background * (1 + f * halfSine * halfSine * halfSine) };
+  return { circumsolar, rest: background * (1 + f * sky.tilt.halfSineCubed) };
 }
 
-function perezOnPlane(sky: SkyMoment, view: number, airMassValue: number): SkyOnPlane {
+function perezOnPlane(sky: SkyMoment, airMassValue: number): SkyOnPlane {
   const clearness = skyClearness(sky.diffuse, sky.beamNormal, sky.zenithDeg);
   const brightness = skyBrightness(sky.diffuse, airMassValue, sky.extraterrestrialNormal);
   const share = perezShares(clearness, brightness, sky.zenithDeg);
   const ratio = Math.max(0, sky.cosIncidence) / Math.max(PEREZ_MIN_COS_ZENITH, sky.cosZenith);
   const circumsolar = sky.diffuse * share.circumsolar * ratio;
-  const rest =
-    sky.diffuse * ((1 - share.circumsolar) * view + share.horizon * Math.sin(toRadians(sky.tiltDeg)));
+  const { skyView, sine } = sky.tilt;
+  const rest = sky.diffuse * ((1 - share.circumsolar) * skyView + share.horizon * sine);
   // a dark horizon band may outweigh the rest of the sky: it then takes from the circumsolar part
   return rest >= 0 ? { circumsolar, rest } : { circumsolar: Math.max(0, circumsolar + rest), rest: 0 };
 }

@@ -1,9 +1,9 @@
 import {
-  groundReflected,
   incidenceCosine,
   type SkyModel,
+  type SkyMoment,
   skyOnPlane,
-  skyViewFactor,
+  tiltFactors,
 } from '@/lib/sun/irradiance-on-plane';
 import type { SunYear } from '@/lib/sun/sun-year';
 import { HOURS_PER_YEAR, toDegrees } from '@/lib/units/constants';
@@ -53,37 +53,39 @@ export function planeYear(
     incidenceDeg: new Float64Array(HOURS_PER_YEAR).fill(90),
     totalWm2: new Float64Array(HOURS_PER_YEAR),
   };
-  const view = skyViewFactor(plane.tiltDeg);
+  const tilt = tiltFactors(plane.tiltDeg);
+  // one record for all hours: making 8,760 of them would take longer than the physics
+  const sky: SkyMoment = {
+    beamNormal: 0,
+    diffuse: 0,
+    global: 0,
+    extraterrestrialNormal: 0,
+    cosZenith: 0,
+    zenithDeg: 0,
+    cosIncidence: 0,
+    tilt,
+  };
   for (let h = 0; h < HOURS_PER_YEAR; h++) {
-    const global = weather.globalWm2[h]!;
-    const diffuse = weather.diffuseWm2[h]!;
-    const ground = groundReflected(global, albedo ?? weather.albedo[h]!, plane.tiltDeg);
+    sky.global = weather.globalWm2[h]!;
+    sky.diffuse = weather.diffuseWm2[h]!;
+    sky.cosZenith = sun.cosZenith[h]!;
     let beam = 0;
-    let sky = diffuse * view;
-    const cosZenith = sun.cosZenith[h]!;
-    if (sun.sunlitFraction[h]! > 0 && cosZenith > 0) {
-      const beamNormal = weather.beamNormalWm2[h]!;
-      const zenithDeg = sun.zenithDeg[h]!;
-      const cosIncidence = incidenceCosine(plane.tiltDeg, plane.azimuthDeg, zenithDeg, sun.azimuthDeg[h]!);
-      const extraterrestrialNormal = sun.extraterrestrialNormalWm2[h]!;
-      const parts = skyOnPlane(model, {
-        beamNormal,
-        diffuse,
-        global,
-        extraterrestrialNormal,
-        cosZenith,
-        zenithDeg,
-        cosIncidence,
-        tiltDeg: plane.tiltDeg,
-      });
-      beam = beamNormal * Math.max(0, cosIncidence) + parts.circumsolar;
-      sky = parts.rest;
-      if (cosIncidence > 0) year.incidenceDeg[h] = toDegrees(Math.acos(cosIncidence));
+    let diffuse = sky.diffuse * tilt.skyView;
+    if (sun.sunlitFraction[h]! > 0 && sky.cosZenith > 0) {
+      sky.zenithDeg = sun.zenithDeg[h]!;
+      sky.beamNormal = weather.beamNormalWm2[h]!;
+      sky.extraterrestrialNormal = sun.extraterrestrialNormalWm2[h]!;
+      sky.cosIncidence = incidenceCosine(plane.tiltDeg, plane.azimuthDeg, sky.zenithDeg, sun.azimuthDeg[h]!);
+      const parts = skyOnPlane(model, sky);
+      beam = sky.beamNormal * Math.max(0, sky.cosIncidence) + parts.circumsolar;
+      diffuse = parts.rest;
+      if (sky.cosIncidence > 0) year.incidenceDeg[h] = toDegrees(Math.acos(sky.cosIncidence));
     }
+    const ground = sky.global * (albedo ?? weather.albedo[h]!) * tilt.groundView;
     year.beamWm2[h] = beam;
-    year.diffuseWm2[h] = sky;
+    year.diffuseWm2[h] = diffuse;
     year.groundWm2[h] = ground;
-    year.totalWm2[h] = beam + sky + ground;
+    year.totalWm2[h] = beam + diffuse + ground;
   }
   return year;
 }

@@ -14,6 +14,8 @@ export const DAYS_PER_YEAR = 365;
 /** Hours of a weather year: 29 February is left out. */
 export const HOURS_PER_YEAR = 8760;
 export const MS_PER_HOUR = 3_600_000;
+/** The earth turns so far in an hour of solar time [°/h]. */
+export const DEGREES_PER_HOUR = 15;
 
 /** Days of each month in a year of 365 days. */
 export const DAYS_IN_MONTH: readonly number[] = [31, 28, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31];
