@@ -1,0 +1,87 @@
+'use client';
+
+import { elementLoss } from '@/lib/physics/heat-loss';
+import type { HouseRecord } from '@/lib/schemas/house';
+import { formatFixed, formatSignificant, withUnit } from '@/lib/units/display';
+import { get, useFormContext, useFormState } from 'react-hook-form';
+import { BigFigures } from './big-figures';
+import { FormSection } from './form-section';
+import { useHeld } from './form-context';
+import { houseLoss } from './house-loss';
+import { LossStones } from './loss-stones';
+import { RowTable } from './row-table';
+
+const COLUMNS = [
+  { field: 'name', track: 'minmax(0,1.4fr)' },
+  { field: 'kind', track: '6rem' },
+  { field: 'areaM2', track: '5rem' },
+  { field: 'uWPerM2K', track: '5rem' },
+  { field: 'factor', track: '5rem' },
+];
+
+function useRowsInError(): (index: number) => boolean {
+  const { control } = useFormContext();
+  const { errors } = useFormState({ control });
+  const rows: unknown = get(errors, 'shell');
+  return (index) => Array.isArray(rows) && rows[index] !== undefined;
+}
+
+/** The shell element by element, its sum, and where the heat goes. */
+export function ShellSection() {
+  const house = useHeld<HouseRecord>();
+  const inError = useRowsInError();
+  const loss = houseLoss(house);
+  const sound = house.shell.filter((_, index) => !inError(index));
+  const held = house.shell.length - sound.length;
+  const sumWPerK = sound.reduce((sum, element) => sum + elementLoss(element), 0);
+  return (
+    <FormSection id="shell" title="Heat through the shell">
+      <RowTable
+        path="shell"
+        caption="Elements of the shell"
+        columns={COLUMNS}
+        addWord="Add an element"
+        originField="uWPerM2K"
+        derived={{
+          head: (
+            <>
+              Loss<span className="block">W/K</span>
+            </>
+          ),
+          cell: (index) => {
+            const element = house.shell[index];
+            if (inError(index) || !element) return <span className="text-muted">held</span>;
+            return formatFixed(elementLoss(element), 1);
+          },
+        }}
+        totals={
+          <p
+            className="flex flex-wrap justify-between gap-x-6 py-2 font-strong tabular-nums"
+            aria-live="polite"
+          >
+            <span>
+              {held ? `Sum without ${held === 1 ? 'the held row' : `${held} held rows`}` : 'Sum of the shell'}
+            </span>
+            <span>{withUnit(formatFixed(loss.shellAreaM2, 1), 'm²')}</span>
+            <span>{withUnit(formatFixed(sumWPerK, 1), 'W/K')}</span>
+          </p>
+        }
+      />
+      <LossStones loss={loss} />
+      <BigFigures
+        figures={[
+          {
+            value: withUnit(formatFixed(loss.wholeWPerK), 'W/K'),
+            words: held
+              ? 'whole loss, with air and the last good values of what is held'
+              : 'whole loss, with air',
+          },
+          {
+            value: withUnit(formatSignificant(loss.designW / 1000, 2), 'kW'),
+            words: `on the design day, ${withUnit(formatFixed(loss.designW / house.floorAreaM2), 'W/m²')}`,
+          },
+        ]}
+      />
+    </FormSection>
+  );
+}
