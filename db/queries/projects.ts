@@ -1,5 +1,5 @@
 import { sql } from 'kysely';
-import type { Kysely } from 'kysely';
+import type { Kysely, Transaction } from 'kysely';
 import type { DesignRecord } from '@/lib/schemas/design';
 import type { HouseRecord } from '@/lib/schemas/house';
 import type { Prices } from '@/lib/schemas/prices';
@@ -17,32 +17,28 @@ export interface NewProject {
 }
 
 /** A project with its house and its designs, all or nothing. */
-export function insertProject(db: Kysely<Database>, project: NewProject): Promise<string> {
-  return db.transaction().execute(async (trx) => {
-    const { id } = await trx
-      .insertInto('project')
-      .values({
-        owner_id: project.ownerId,
-        name: project.name,
-        prices: JSON.stringify(project.prices),
-        weather_year_id: project.weatherYearId,
-      })
-      .returning('id')
-      .executeTakeFirstOrThrow();
-    await trx
-      .insertInto('house')
-      .values({ project_id: id, data: JSON.stringify(project.house) })
-      .execute();
-    if (project.designs.length > 0) {
-      const rows = project.designs.map((design, position) => ({
-        project_id: id,
-        data: JSON.stringify(design),
-        position,
-      }));
-      await trx.insertInto('design').values(rows).execute();
-    }
-    return id;
-  });
+export async function insertProject(trx: Transaction<Database>, project: NewProject): Promise<string> {
+  const { id } = await trx
+    .insertInto('project')
+    .values({
+      owner_id: project.ownerId,
+      name: project.name,
+      prices: JSON.stringify(project.prices),
+      weather_year_id: project.weatherYearId,
+    })
+    .returning('id')
+    .executeTakeFirstOrThrow();
+  await trx
+    .insertInto('house')
+    .values({ project_id: id, data: JSON.stringify(project.house) })
+    .execute();
+  const designs = project.designs.map((design, position) => ({
+    project_id: id,
+    data: JSON.stringify(design),
+    position,
+  }));
+  if (designs.length > 0) await trx.insertInto('design').values(designs).execute();
+  return id;
 }
 
 export function listProjectsOfOwner(db: Kysely<Database>, ownerId: string) {

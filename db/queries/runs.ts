@@ -1,4 +1,4 @@
-import type { Kysely } from 'kysely';
+import type { Kysely, Transaction } from 'kysely';
 import type { YearResult } from '@/lib/simulation/results';
 import { packHours, unpackHours } from '../pack-hours';
 import type { Database, RunRow } from '../schema';
@@ -8,31 +8,29 @@ const KEPT_RUNS = 5;
 
 /** Stores a run and returns it; storing the same inputs again changes nothing. */
 export async function insertRun(
-  db: Kysely<Database>,
+  trx: Transaction<Database>,
   designId: string,
   inputsHash: string,
   result: YearResult,
 ): Promise<RunRow> {
   const { columns, months, balance, engineVersion, ...summary } = result;
   const { layout, bytes } = packHours(columns);
-  return db.transaction().execute(async (trx) => {
-    await trx
-      .insertInto('run')
-      .values({
-        design_id: designId,
-        inputs_hash: inputsHash,
-        engine_version: engineVersion,
-        summary: JSON.stringify(summary),
-        months: JSON.stringify(months),
-        balance: JSON.stringify(balance),
-        columns_layout: JSON.stringify(layout),
-        columns: bytes,
-      })
-      .onConflict((conflict) => conflict.constraint('run_of_inputs').doNothing())
-      .execute();
-    await deleteOldRuns(trx, designId);
-    return findRun(trx, designId, inputsHash, engineVersion).executeTakeFirstOrThrow();
-  });
+  await trx
+    .insertInto('run')
+    .values({
+      design_id: designId,
+      inputs_hash: inputsHash,
+      engine_version: engineVersion,
+      summary: JSON.stringify(summary),
+      months: JSON.stringify(months),
+      balance: JSON.stringify(balance),
+      columns_layout: JSON.stringify(layout),
+      columns: bytes,
+    })
+    .onConflict((conflict) => conflict.constraint('run_of_inputs').doNothing())
+    .execute();
+  await deleteOldRuns(trx, designId);
+  return findRun(trx, designId, inputsHash, engineVersion).executeTakeFirstOrThrow();
 }
 
 async function deleteOldRuns(db: Kysely<Database>, designId: string): Promise<void> {

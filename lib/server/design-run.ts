@@ -59,7 +59,7 @@ export async function yearOfDesign(
       return { ok: false, code: 'not found', message: 'The weather year of this project is gone.' };
     const outcome = await runPool().run({ weather, house: house.data, design: design.data, numerics });
     if (!outcome.ok) return outcome;
-    run = await insertRun(db, design.id, hash, outcome.result);
+    run = await db.transaction().execute((trx) => insertRun(trx, design.id, hash, outcome.result));
   }
   return { ok: true, summary: summaryOfRun(run, hash), result: resultOfRun(run) };
 }

@@ -65,16 +65,14 @@ export function listProjects(): Promise<Answer<{ projects: ProjectSummary[] }>> 
 /** A new project: the demonstration house, its prices and its designs, to be changed at will. */
 export function createProjectFromDemonstration(name?: string): Promise<Answer<{ projectId: string }>> {
   return asAccount(async (account) => {
-    const input = parseInput(projectName, { name: name ?? demonstration.name });
+    const input = parseInput(projectName, { name: name ?? demonstration.house.name });
     if (!input.ok) return input;
-    const projectId = await insertProject(database(), {
-      ownerId: account.id,
-      name: input.data.name,
-      house: demonstration.house,
-      prices: demonstration.prices,
-      designs: demonstration.designs,
-      weatherYearId: (await findClimateId(database(), demonstration.climateId)) ?? null,
-    });
+    const weatherYearId = (await findClimateId(database(), demonstration.climateId)) ?? null;
+    const { house, prices, designs } = demonstration;
+    const project = { ownerId: account.id, name: input.data.name, house, prices, designs, weatherYearId };
+    const projectId = await database()
+      .transaction()
+      .execute((trx) => insertProject(trx, project));
     return { ok: true, projectId };
   });
 }

@@ -1,0 +1,3 @@
+import { handlers } from '@/lib/auth/next-auth';
+
+export const { GET, POST } = handlers;
