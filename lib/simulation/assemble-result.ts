@@ -60,6 +60,8 @@ export function assembleResult(
       roomMinC: least(columns.roomC),
       roomMaxC: largest(columns.roomC),
       floorMaxC: largest(columns.floorSurfaceC),
+      floorHeatedMaxC: largestWhile(columns.floorSurfaceC, columns.supplyC),
+      southern: input.weather.latitudeDeg < 0,
       storeMaxC: largest(columns.storeTopC),
       plateMaxC: tally.plateMaxC,
       coldestInletC: tally.coldestInletC,
@@ -139,6 +141,15 @@ function energyBalance(tally: Tally, plan: Plan): EnergyBalance {
 function largest(values: Float32Array): number {
   let most = -Infinity;
   for (const value of values) if (value > most) most = value;
+  return most;
+}
+
+/** Largest value in hours in which the other column has one. */
+function largestWhile(values: Float32Array, running: Float32Array): number {
+  let most = -Infinity;
+  for (let h = 0; h < values.length; h++) {
+    if (!Number.isNaN(running[h]!) && values[h]! > most) most = values[h]!;
+  }
   return most;
 }
 

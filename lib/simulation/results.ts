@@ -124,6 +124,10 @@ export interface YearTotals extends EnergyRow {
   roomMinC: number;
   roomMaxC: number;
   floorMaxC: number;
+  /** hottest floor surface in hours in which the emitters ran; −Infinity if they never did */
+  floorHeatedMaxC: number;
+  /** weather year of the southern half of the Earth */
+  southern: boolean;
   storeMaxC: number;
   /** highest plate temperature that the run itself reached (not the dry temperature) */
   plateMaxC: number;
