@@ -1,15 +1,23 @@
 'use client';
 
-import { zodResolver } from '@hookform/resolvers/zod';
-import { useEffect, useMemo, useState, type FocusEvent, type KeyboardEvent, type ReactNode } from 'react';
-import { FormProvider, useForm, type FieldValues, type Resolver } from 'react-hook-form';
+import {
+  useEffect,
+  useMemo,
+  useState,
+  useSyncExternalStore,
+  type FocusEvent,
+  type KeyboardEvent,
+  type ReactNode,
+} from 'react';
+import { FormProvider, useForm, type FieldValues } from 'react-hook-form';
 import type { z } from 'zod';
 import { Contents, type ContentsEntry } from './contents';
 import { forgetDraft, keepDraft, readDraft } from './draft';
 import { FormKnowledgeContext, HeldContext } from './form-context';
+import { resolverOf } from './form-resolver';
 import { MarginNotes } from './margin-notes';
 import { SaveBar } from './save-bar';
-import { fromTyped, heldValues, toTyped, type Typed } from './typed-values';
+import { heldValues, toTyped, withoutRow, type Typed } from './typed-values';
 import { useSaving, type SaveAnswer, type Stored } from './use-saving';
 
 interface SchemaFormProps<T> {
@@ -30,43 +38,55 @@ interface SchemaFormProps<T> {
 
 type TypedRecord = { [key: string]: Typed };
 
-function resolverOf(schema: z.ZodObject): Resolver<FieldValues> {
-  const judge = zodResolver(schema);
-  return (typed, context, options) =>
-    judge(fromTyped(schema, typed) as FieldValues, context, options as Parameters<typeof judge>[2]);
-}
-
-function withoutRow(record: unknown, path: string[], index: number): unknown {
-  const [key, ...rest] = path;
-  if (key === undefined) return Array.isArray(record) ? record.filter((_, i) => i !== index) : record;
-  const here = record as Record<string, unknown>;
-  return { ...here, [key]: withoutRow(here[key], rest, index) };
-}
+const never = () => () => undefined;
 
 /**
  * A form page: contents, sheet, margin notes. Limits, words and defaults come from the schema; what is typed is kept
  * in this tab until the server has taken it.
  */
 export function SchemaForm<T extends FieldValues>(props: SchemaFormProps<T>) {
+  const inBrowser = useSyncExternalStore(
+    never,
+    () => true,
+    () => false,
+  );
+  return <FormSheet key={String(inBrowser)} {...props} inBrowser={inBrowser} />;
+}
+
+/** The draft of before a reload, where it says something else than the database. */
+function unsavedDraft(draftKey: string, savedText: TypedRecord) {
+  const draft = readDraft(draftKey);
+  return draft && JSON.stringify(draft.typed) !== JSON.stringify(savedText) ? draft : undefined;
+}
+
+function FormSheet<T extends FieldValues>(props: SchemaFormProps<T> & { inBrowser: boolean }) {
   const { schema, draftKey, currency, contents } = props;
-  const [stored, setStored] = useState(props.stored);
-  const savedText = useMemo(() => toTyped(schema, stored.data) as TypedRecord, [schema, stored]);
-  const [held, setHeld] = useState<unknown>(() => schema.parse(stored.data));
+  const [draft] = useState(() =>
+    props.inBrowser ? unsavedDraft(draftKey, toTyped(schema, props.stored.data) as TypedRecord) : undefined,
+  );
+  const [restored, setRestored] = useState(draft !== undefined);
+  const [stored, setStored] = useState({
+    data: props.stored.data,
+    version: draft?.version ?? props.stored.version,
+  });
+  const [held, setHeld] = useState<unknown>(() => {
+    const saved = schema.parse(stored.data);
+    return draft ? heldValues(schema, draft.typed, saved) : saved;
+  });
   const [focused, setFocused] = useState('');
-  const [restored, setRestored] = useState(false);
   const resolver = useMemo(() => resolverOf(schema), [schema]);
-  const form = useForm<FieldValues>({ defaultValues: savedText, resolver, mode: 'onTouched' });
+  const form = useForm<FieldValues>({
+    defaultValues: toTyped(schema, stored.data) as TypedRecord,
+    resolver,
+    mode: 'onTouched',
+  });
   const { state, pending, save, calm } = useSaving(props.save);
 
   useEffect(() => {
-    const draft = readDraft(draftKey);
-    if (!draft || JSON.stringify(draft.typed) === JSON.stringify(form.getValues())) return;
+    if (!draft) return;
     form.reset(draft.typed, { keepDefaultValues: true });
-    setStored((now) => ({ ...now, version: draft.version }));
-    setHeld((last: unknown) => heldValues(schema, draft.typed, last as z.output<typeof schema>));
-    setRestored(true);
     void form.trigger();
-  }, [draftKey, form, schema]);
+  }, [draft, form]);
 
   useEffect(
     () =>

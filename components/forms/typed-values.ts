@@ -117,3 +117,11 @@ function hold(schema: z.ZodType, typed: Typed | undefined, last: unknown): unkno
 export function heldValues<S extends z.ZodType>(schema: S, typed: Typed, lastGood: z.output<S>): z.output<S> {
   return hold(schema, typed, lastGood) as z.output<S>;
 }
+
+/** A record without one row of the list at a path. */
+export function withoutRow(record: unknown, path: readonly string[], index: number): unknown {
+  const [key, ...rest] = path;
+  if (key === undefined) return Array.isArray(record) ? record.filter((_, i) => i !== index) : record;
+  const here = record as Record<string, unknown>;
+  return { ...here, [key]: withoutRow(here[key], rest, index) };
+}
