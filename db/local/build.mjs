@@ -43,8 +43,9 @@ export async function ensureBuild(signal) {
 
 /** A page that asked the database while it is built would freeze its answer: without an address it fails instead. */
 function buildEnvironment() {
-  const { DATABASE_URL: _, ...rest } = process.env;
-  return { ...rest, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' };
+  const env = { ...process.env, NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1' };
+  delete env.DATABASE_URL;
+  return env;
 }
 
 function stampedHash() {
