@@ -26,7 +26,7 @@ export interface HeatCostInput {
   solarKwhPerYear: number;
   /** bought energy saved in a year [kWh] */
   savedKwhPerYear: number;
-  /** loss of yield per year [-]; the t-th year gives (1 − d)^t */
+  /** loss of yield per year [-]; the t-th year gives (1 − d)^(t − 1) */
   yieldLossPerYear?: number;
 }
 
@@ -129,6 +129,6 @@ function presentEnergy(
   const kept = 1 - (input.yieldLossPerYear ?? 0);
   let sum = 0;
   for (let year = 1; year <= input.years; year++)
-    sum += (perYear * kept ** year) / (1 + input.realRate) ** year;
+    sum += (perYear * kept ** (year - 1)) / (1 + input.realRate) ** year;
   return sum;
 }

@@ -1,4 +1,6 @@
-const GJ_PER_KWH = 0.0036;
+import { J_PER_KWH } from '@/lib/units/constants';
+
+const GJ_PER_KWH = J_PER_KWH / 1e9;
 
 /** CO₂ of burning on the net calorific value [kg/GJ]; wood is biogenic and counted apart by convention. */
 export const FUEL_CO2_KG_PER_GJ = {

@@ -1,3 +1,5 @@
+import { L_PER_M3, MM_PER_M } from '@/lib/units/constants';
+
 /**
  * Loss of an insulated pipe per metre: U' = π/(ln(D/d)/(2λ) + 1/(h D)).
  * @param pipeDiameterM outer diameter of the pipe d [m] above 0
@@ -65,5 +67,5 @@ export function pipeLossFactors(
  * @see geometry; own definition
  */
 export function pipeContentLPerM(boreMm: number): number {
-  return (Math.PI * boreMm * boreMm) / 4000;
+  return (Math.PI * (boreMm / MM_PER_M) ** 2 * L_PER_M3) / 4;
 }

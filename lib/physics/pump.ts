@@ -1,4 +1,4 @@
-import { GRAVITY_M_PER_S2 } from '@/lib/units/constants';
+import { GRAVITY_M_PER_S2, WH_PER_KWH } from '@/lib/units/constants';
 
 /**
  * Electric power to lift water: P = ṁ g H/η.
@@ -43,5 +43,5 @@ export function runningHeadM(liftM: number, frictionM: number, siphonReturn: boo
  * @see definition of energy, ISO 80000-4:2019
  */
 export function pumpEnergyKwh(powerW: number, hours: number): number {
-  return (powerW * hours) / 1000;
+  return (powerW * hours) / WH_PER_KWH;
 }
