@@ -71,6 +71,24 @@ export function seenFrom(latitudeDeg: number, declinationDeg: number, hourAngleD
   };
 }
 
+/**
+ * Hour angle of a sun seen at a place: the inverse of seenFrom.
+ * Equation: ω = atan2(sin θz sin γ, cos θz cos φ + sin θz cos γ sin φ), γ from south, west positive.
+ * @param latitudeDeg φ, north positive [°] −90…90
+ * @param zenithDeg θz [°] 0…180
+ * @param azimuthDeg clockwise from north [°]
+ * @returns ω, 0 at solar noon, afternoon positive [°] −180…180
+ * @see J. Meeus, Astronomical Algorithms, 2nd ed. 1998, ch. 13
+ */
+export function hourAngleDeg(latitudeDeg: number, zenithDeg: number, azimuthDeg: number): number {
+  const phi = toRadians(latitudeDeg);
+  const z = toRadians(zenithDeg);
+  const west = toRadians(azimuthDeg - 180);
+  const across = Math.sin(z) * Math.sin(west);
+  const along = Math.cos(z) * Math.cos(phi) + Math.sin(z) * Math.cos(west) * Math.sin(phi);
+  return toDegrees(Math.atan2(across, along));
+}
+
 /** Solves apparent = h + R(h) for the true altitude h by fixed point, since R changes slowly. */
 function trueAltitudeDeg(apparentDeg: number): number {
   if (apparentDeg <= HORIZON_REFRACTION_DEG) return apparentDeg - HORIZON_REFRACTION_DEG;

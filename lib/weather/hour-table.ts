@@ -1,4 +1,5 @@
 import { DAYS_IN_MONTH, HOURS_PER_DAY, HOURS_PER_YEAR, MONTH_START_HOUR } from '@/lib/units/constants';
+import { MONTH_NAMES } from '@/lib/weather/month-names';
 import type { RowProblem } from '@/lib/weather/weather-result';
 
 /** What a reader fills; NaN stands for a value that the file does not give. */
@@ -16,8 +17,6 @@ export interface HourColumns {
 }
 
 export type HourColumn = keyof HourColumns;
-
-const MONTH_NAMES = 'January February March April May June July August September October November December';
 
 /**
  * Hours of a file put in their places by month, day and hour of the stamp, never by its year: typical years are
@@ -94,5 +93,5 @@ export function hourWords(hour: number): string {
   while (MONTH_START_HOUR[month + 1]! <= hour) month++;
   const inMonth = hour - MONTH_START_HOUR[month]!;
   const day = Math.floor(inMonth / HOURS_PER_DAY) + 1;
-  return `${day} ${MONTH_NAMES.split(' ')[month]}, hour ${(inMonth % HOURS_PER_DAY) + 1}`;
+  return `${day} ${MONTH_NAMES[month]}, hour ${(inMonth % HOURS_PER_DAY) + 1}`;
 }
