@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { buildingRows } from './building-rows';
 import { collectorRows } from './collector-rows';
 import { emitterRows } from './emitter-rows';
+import { houseRows } from './house-rows';
 import { hydraulicsRows } from './hydraulics-rows';
 import { moneyRows } from './money-rows';
 import type { ReferenceRow } from './reference-row';
@@ -13,6 +14,7 @@ const rows: ReferenceRow[] = [
   ...storeAndWaterRows,
   ...hydraulicsRows,
   ...buildingRows,
+  ...houseRows,
   ...moneyRows,
 ];
 const published = rows.filter((row) => row.tier !== 'C');
