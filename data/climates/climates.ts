@@ -18,3 +18,8 @@ export const climates: readonly Climate[] = [uplandU46, lowlandL52].map((means) 
     return made.year;
   },
 }));
+
+/** The year of a shipped climate, undefined when there is none of that id. */
+export function climateYear(id: string): WeatherYear | undefined {
+  return climates.find((climate) => climate.id === id)?.weatherYear();
+}
