@@ -10,6 +10,8 @@ interface Documented {
   name: string;
   text: string;
   source: string;
+  /** the signature carries numbers: a quantity, so a unit and a source are due */
+  numeric: boolean;
 }
 
 /** Exported functions of a file with their docstrings. */
@@ -19,11 +21,13 @@ function exportedFunctions(file: string): Documented[] {
   return tree.statements.filter(ts.isFunctionDeclaration).flatMap((node) => {
     if (!node.modifiers?.some((modifier) => modifier.kind === ts.SyntaxKind.ExportKeyword)) return [];
     const docs = ts.getJSDocCommentsAndTags(node).filter(ts.isJSDoc);
+    const types = [...node.parameters.map((parameter) => parameter.getText()), node.type?.getText() ?? ''];
     const see = ts.getJSDocTags(node).find((tag) => tag.tagName.text === 'see');
     return {
       name: `${path.relative(ROOT, file)}: ${node.name?.text ?? 'default'}`,
       text: docs.map((doc) => doc.getText()).join('\n'),
       source: see?.getText().replace(/^@see\s*/, '') ?? '',
+      numeric: types.some((type) => /\bnumber\b|Float(32|64)Array|= -?\d/.test(type)),
     };
   });
 }
@@ -35,21 +39,29 @@ const files = ROOMS.flatMap((room) =>
 );
 const functions = files.flatMap(exportedFunctions);
 
-/** A unit in brackets ([W/m²], [-], [money]) or, for functions of texts and records, "own definition" as source. */
+/** Functions of texts, bytes and records have neither unit nor published source: a docstring is enough. */
+const quantities = functions.filter((entry) => entry.numeric);
+
+/** A unit in brackets ([W/m²], [-], [money]), or "own definition" as source where a number has none. */
 const hasUnit = ({ text, source }: Documented) =>
   /\[[^\]\s][^\]]*\]/.test(text) || source.startsWith('own definition');
 
 describe('docstrings of the core', () => {
   it('finds the functions', () => {
     expect(functions.length).toBeGreaterThan(80);
+    expect(quantities.length).toBeGreaterThan(80);
+  });
+
+  it('say what each exported function is for', () => {
+    expect(functions.filter((entry) => entry.text.length < 20).map((entry) => entry.name)).toEqual([]);
   });
 
   it('state units', () => {
-    expect(functions.filter((entry) => !hasUnit(entry)).map((entry) => entry.name)).toEqual([]);
+    expect(quantities.filter((entry) => !hasUnit(entry)).map((entry) => entry.name)).toEqual([]);
   });
 
   it('name a source, or say that it is the product’s own definition', () => {
-    expect(functions.filter((entry) => entry.source.trim().length < 8).map((entry) => entry.name)).toEqual(
+    expect(quantities.filter((entry) => entry.source.trim().length < 8).map((entry) => entry.name)).toEqual(
       [],
     );
   });

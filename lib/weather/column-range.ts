@@ -1,4 +1,9 @@
-/** Smallest, largest and mean value of a column without gaps. */
+/**
+ * Smallest, largest and mean value of a column without gaps.
+ * @param values the hours, in the column's own unit
+ * @returns smallest, largest and mean value in the same unit
+ * @see own definition
+ */
 export function columnRange(values: Float64Array): { min: number; max: number; mean: number } {
   let min = Infinity;
   let max = -Infinity;

@@ -9,7 +9,12 @@ export interface HourRun {
 /** Longest gap that is closed by interpolation [h]; common practice for hourly years. */
 export const MAX_GAP_H = 3;
 
-/** Runs of hours for which `isGap` holds; the year is a ring, so 31 December joins 1 January. */
+/**
+ * Runs of hours for which `isGap` holds; the year is a ring, so 31 December joins 1 January.
+ * @param isGap whether an hour of the year (0…8759) belongs to a run
+ * @returns first hour and length of each run [h]
+ * @see own definition
+ */
 export function hourRuns(isGap: (hour: number) => boolean): HourRun[] {
   let solid = 0;
   while (solid < HOURS_PER_YEAR && isGap(solid)) solid++;

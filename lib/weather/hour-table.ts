@@ -87,7 +87,12 @@ function unknownColumn(): Float64Array {
   return new Float64Array(HOURS_PER_YEAR).fill(NaN);
 }
 
-/** An hour of the year in words: "6 May, hour 14". */
+/**
+ * An hour of the year in words: "6 May, hour 14".
+ * @param hour hour of the year [h] 0…8759
+ * @returns words
+ * @see own definition
+ */
 export function hourWords(hour: number): string {
   let month = 0;
   while (MONTH_START_HOUR[month + 1]! <= hour) month++;
