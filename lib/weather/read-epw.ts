@@ -39,7 +39,9 @@ export function readEpw(bytes: Uint8Array, options: ReadOptions = {}): WeatherRe
   const scanner = new ByteScanner(bytes);
   const location = splitFields(scanner.textLine());
   const [latitudeDeg, longitudeDeg, timeZoneH, elevationM] = location.slice(6, 10).map(Number);
-  if (location.length < 10 || ![latitudeDeg, longitudeDeg, timeZoneH, elevationM].every(Number.isFinite)) {
+  const numbers = [latitudeDeg, longitudeDeg, timeZoneH, elevationM];
+  const named = location[0]?.toUpperCase() === 'LOCATION' && location.length >= 10;
+  if (!named || !numbers.every(Number.isFinite)) {
     return noLocation();
   }
   while (!scanner.atEnd && startsHeader(scanner.peek())) {
