@@ -19,13 +19,14 @@ const GROUPS = 4;
 const GROUP_LENGTH = 5;
 
 export interface Seeded {
-  /** only when the owner was created just now: it is stored nowhere else */
+  /** only when the owner was created just now with a random password: it is stored nowhere else */
   newOwner?: { email: string; password: string };
 }
 
 /**
  * Puts in what the application needs to begin with: the shipped climates, one owner, and for the owner a copy of
- * the demonstration. Running it again renews the climates and changes nothing else.
+ * the demonstration. Running it again renews the climates and changes nothing else. The owner's password is random
+ * unless TEPIDARIUM_OWNER_PASSWORD gives one.
  */
 export async function seed(url: string): Promise<Seeded> {
   const db = openDatabase(url);
@@ -51,7 +52,8 @@ async function seedClimates(db: Kysely<Database>): Promise<void> {
 async function seedOwner(db: Transaction<Database>): Promise<Seeded> {
   const anyAccount = await db.selectFrom('account').select('id').limit(1).executeTakeFirst();
   if (anyAccount) return {};
-  const password = readablePassword();
+  const chosen = process.env.TEPIDARIUM_OWNER_PASSWORD;
+  const password = chosen ?? readablePassword();
   const owner = await insertAccount(db, {
     email: OWNER_EMAIL,
     password_hash: await hashPassword(password),
@@ -61,7 +63,7 @@ async function seedOwner(db: Transaction<Database>): Promise<Seeded> {
   const { house, prices, designs, climateId } = demonstration;
   const weatherYearId = (await findClimateId(db, climateId)) ?? null;
   await insertProject(db, { ownerId: owner.id, name: house.name, house, prices, designs, weatherYearId });
-  return { newOwner: { email: OWNER_EMAIL, password } };
+  return chosen ? {} : { newOwner: { email: OWNER_EMAIL, password } };
 }
 
 function readablePassword(): string {

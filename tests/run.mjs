@@ -1,5 +1,6 @@
 import '../db/local/node-version.mjs';
 import { randomUUID } from 'node:crypto';
+import { randomBytes } from 'node:crypto';
 import { closeSync, openSync, rmSync } from 'node:fs';
 import path from 'node:path';
 import { ensureBuild } from '../db/local/build.mjs';

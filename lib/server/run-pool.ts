@@ -1,5 +1,6 @@
 import 'server-only';
 import path from 'node:path';
+import { pathToFileURL } from 'node:url';
 import { Worker } from 'node:worker_threads';
 import type { Answer, Refusal } from '@/lib/schemas/answer';
 import type { Design, House, Numerics } from '@/lib/simulation/design';
@@ -36,6 +37,9 @@ interface Job {
   settle: (answer: Answer<{ result: YearResult }>) => void;
 }
 
+/** Loads TypeScript, then the script. */
+const BOOT = 'workers/start-thread.mjs';
+
 const refuse = (code: Refusal['code'], message: string): Refusal => ({ ok: false, code, message });
 const BUSY = refuse('busy', 'The server is working other years just now. Try again in a few seconds.');
 const TOO_SLOW = refuse(
@@ -54,9 +58,12 @@ export function createRunPool({ script, threads, queueLength, budgetMs }: RunPoo
   const waiting: Job[] = [];
 
   function start(): Worker {
-    // The path is put together at run time: the bundler must leave the script to the thread's own loader.
-    const file = path.join(process.cwd(), ...script.split('/'));
-    const worker = new Worker(file, { execArgv: ['--import', 'tsx'] });
+    // Paths are put together at run time: the bundler must leave the scripts to the thread's own loader.
+    const inApplication = (file: string) => pathToFileURL(path.join(process.cwd(), ...file.split('/')));
+    const worker = new Worker(inApplication(BOOT), {
+      execArgv: [],
+      workerData: { script: inApplication(script).href },
+    });
     // A thread that fails while idle only leaves the pool.
     worker.on('error', () => undefined);
     worker.on('exit', () => forget(worker));
