@@ -1,0 +1,97 @@
+import { clock, dayName } from '@/components/mosaic/calendar';
+import { partsOverLimit } from '@/components/mosaic/stones';
+import { CARRIERS } from '@/lib/simulation/results';
+import type { Carrier } from '@/lib/simulation/results';
+import type { StudyAnswer } from '@/lib/study/study-question';
+import { HOURS_PER_DAY, W_PER_KW } from '@/lib/units/constants';
+import { formatFixed, formatSignificant, withUnit } from '@/lib/units/display';
+
+const SMALLEST_W = 20;
+
+/** "2.4 kW". */
+export function kilowatts(watts: number): string {
+  return withUnit(formatSignificant(watts / W_PER_KW, 2), 'kW');
+}
+
+/** "36.4 °C". */
+export function celsius(temperatureC: number, decimals = 1): string {
+  return withUnit(formatFixed(temperatureC, decimals), '°C');
+}
+
+/** "26 February, 13:00 to 14:00". */
+export function hourName(hour: number): string {
+  const start = hour % HOURS_PER_DAY;
+  return `${dayName(Math.floor(hour / HOURS_PER_DAY))}, ${clock(start)} to ${clock(start + 1)}`;
+}
+
+const SPOKEN_CARRIERS: Record<Carrier, string> = {
+  'nothing needed': 'nothing needed',
+  'sun, straight in': 'sun straight in',
+  'sun from the store': 'sun from the store',
+  'sun and backup': 'sun and backup',
+  'store and backup': 'store and backup',
+  backup: 'backup',
+  'not met': 'not warm enough',
+};
+
+function carrierAt(answer: StudyAnswer, hour: number): Carrier {
+  return CARRIERS[answer.result.columns.carrier[hour]!]!;
+}
+
+function tooHotParts(answer: StudyAnswer, hour: number): string[] {
+  return partsOverLimit(answer.result.columns.overLimit[hour]!, answer.design.collector.parts);
+}
+
+/** What a screen reader says of the stone under the cursor. */
+export function spokenHour(answer: StudyAnswer, hour: number): string {
+  const { columns } = answer.result;
+  const heatW =
+    columns.solarHeatingW[hour]! +
+    columns.solarTapW[hour]! +
+    columns.backupHeatingW[hour]! +
+    columns.backupTapW[hour]!;
+  const words = [
+    hourName(hour).replace(',', ''),
+    SPOKEN_CARRIERS[carrierAt(answer, hour)],
+    heatW > SMALLEST_W ? kilowatts(heatW) : '',
+    `store ${celsius(columns.storeTopC[hour]!, 0)}`,
+    `room ${celsius(columns.roomC[hour]!)}`,
+    ...tooHotParts(answer, hour).map((part) => `empty ${part} above its limit`),
+  ];
+  return words.filter(Boolean).join(', ');
+}
+
+/** One or two sentences on who carries the house in an hour. */
+export function hourSentence(answer: StudyAnswer, hour: number): string {
+  const { columns } = answer.result;
+  const sunW = columns.solarHeatingW[hour]! + columns.solarTapW[hour]!;
+  const backupW = columns.backupHeatingW[hour]! + columns.backupTapW[hour]!;
+  const carrier = carrierAt(answer, hour);
+  const sentences = [carrierSentence(carrier, sunW, backupW)];
+  if (columns.arrayW[hour]! > SMALLEST_W) {
+    sentences.push(`The array puts ${kilowatts(columns.arrayW[hour]!)} into the store.`);
+  }
+  const parts = tooHotParts(answer, hour);
+  if (parts.length > 0)
+    sentences.push(`Standing empty, ${parts.join(' and ')} would be hotter than it may be.`);
+  return sentences.join(' ');
+}
+
+function carrierSentence(carrier: Carrier, sunW: number, backupW: number): string {
+  switch (carrier) {
+    case 'nothing needed':
+      return 'The house needs no heat.';
+    case 'sun, straight in':
+      return `The sun carries the house with ${kilowatts(sunW)}. No backup.`;
+    case 'sun from the store':
+      return `The store carries the house with ${kilowatts(sunW)}. No backup.`;
+    case 'sun and backup':
+      return `Sun with ${kilowatts(sunW)} and backup with ${kilowatts(backupW)} share the house.`;
+    case 'store and backup':
+      return `The store with ${kilowatts(sunW)} and backup with ${kilowatts(backupW)} share the house.`;
+    case 'backup':
+      return `The backup carries the house with ${kilowatts(backupW)}.`;
+    case 'not met':
+      return 'The house gets less heat than it asks for.';
+  }
+}

@@ -1,0 +1,105 @@
+import type { HouseRecord } from '@/lib/schemas/house';
+import type { Prices } from '@/lib/schemas/prices';
+import type { StudyAnswer } from '@/lib/study/study-question';
+import { formatFixed, formatShare, formatSignificant, formatTyped, withUnit } from '@/lib/units/display';
+import { fuelAmount, pricePerKwh } from './verdict-words';
+import type { VerdictNumber } from './verdict-words';
+
+/** How a number of the verdict was made. */
+export interface Explanation {
+  title: string;
+  value: string;
+  equation: string;
+  inputs: { name: string; value: string }[];
+  source: string;
+}
+
+const kwh = (value: number) => withUnit(formatSignificant(value, 3), 'kWh');
+
+/** Opens one number of the verdict: its equation in words, the inputs with their values, the source. */
+export function explain(
+  number: VerdictNumber,
+  answer: StudyAnswer,
+  house: HouseRecord,
+  prices: Prices,
+): Explanation {
+  const { design, result, cost } = answer;
+  const { year } = result;
+  const solarKwh = year.solarHeatingKwh + year.solarTapKwh;
+  const fuel = (boughtKwh: number) => {
+    const { figure, unit } = fuelAmount(boughtKwh, house, prices);
+    return withUnit(figure, unit);
+  };
+  const efficiency = {
+    name: 'seasonal efficiency of the backup',
+    value: formatTyped(house.backup.seasonalEfficiency),
+  };
+  const perKg = { name: 'energy in the fuel', value: withUnit(formatTyped(prices.fuelKwhPerKg), 'kWh/kg') };
+  switch (number) {
+    case 'area':
+      return {
+        title: 'Array area',
+        value: withUnit(formatTyped(design.array.areaM2), 'm²'),
+        equation: 'An input: the lever below sets it.',
+        inputs: [
+          { name: 'area basis of the curve', value: design.collector.curve.areaBasis },
+          { name: 'filled width of the absorber', value: formatTyped(design.collector.widthFactor) },
+          { name: 'collected per square metre', value: kwh(year.collectedKwh / design.array.areaM2) },
+        ],
+        source: 'Area basis as in ISO 9806.',
+      };
+    case 'share':
+      return {
+        title: 'Share carried by the sun',
+        value: formatShare(year.fractions.solar),
+        equation: 'solar heat divided by solar heat plus backup heat',
+        inputs: [
+          { name: 'store to the heating', value: kwh(year.solarHeatingKwh) },
+          { name: 'store to hot water', value: kwh(year.solarTapKwh) },
+          { name: 'backup to the heating', value: kwh(year.backupHeatingKwh) },
+          { name: 'backup to hot water', value: kwh(year.backupTapKwh) },
+        ],
+        source: 'Solar fraction of ISO 9488; sums over the hours of this run.',
+      };
+    case 'price':
+      return {
+        title: 'Cost of solar heat',
+        value: pricePerKwh(cost.heat.perKwh, prices.currency),
+        equation:
+          'present value of building, upkeep, pump power and replacements less what is left at the end, divided by the discounted solar heat',
+        inputs: [
+          ...cost.heat.receipt.map((line) => ({
+            name: line.label,
+            value: pricePerKwh(line.perKwh, prices.currency),
+          })),
+          { name: 'solar heat a year', value: kwh(solarKwh) },
+          { name: 'real interest', value: withUnit(formatTyped(prices.realRate), '%') },
+          { name: 'years counted', value: formatFixed(prices.years) },
+        ],
+        source: 'Form of IEA SHC Task 54; house emitters and boiler are not counted.',
+      };
+    case 'fuel':
+      return {
+        title: 'Fuel still bought',
+        value: fuel(year.boughtKwh),
+        equation: 'backup heat to heating and hot water, divided by the seasonal efficiency',
+        inputs: [
+          { name: 'backup to the heating', value: kwh(year.backupHeatingKwh) },
+          { name: 'backup to hot water', value: kwh(year.backupTapKwh) },
+          efficiency,
+          { name: 'bought energy', value: kwh(year.boughtKwh) },
+          perKg,
+        ],
+        source: 'Sums over the hours of this run.',
+      };
+    case 'reference':
+      return {
+        title: 'Fuel without the sun',
+        value: fuel(year.referenceBoughtKwh),
+        equation:
+          'need of the same house in the same year without array and store, divided by the same efficiency',
+        inputs: [{ name: 'need without the sun', value: kwh(year.referenceNeedKwh) }, efficiency, perKg],
+        source: 'A run of its own with the same house and weather.',
+      };
+  }
+}

@@ -1,0 +1,123 @@
+'use client';
+
+import { useMemo, useState } from 'react';
+import type { ReactNode } from 'react';
+import { monthOrder } from '@/components/mosaic/calendar';
+import { Legend } from '@/components/mosaic/legend';
+import { LOUPE_DAYS, Loupe, loupeStart } from '@/components/mosaic/loupe';
+import { Mosaic } from '@/components/mosaic/mosaic';
+import { BAND_READINGS, FIRST_OF_JULY } from '@/components/mosaic/stones';
+import type { ReadingId } from '@/components/mosaic/stones';
+import type { Site } from '@/components/mosaic/sun-lines';
+import { Segmented } from '@/components/ui/segmented';
+import type { StudyAnswer } from '@/lib/study/study-question';
+import { HOURS_PER_DAY } from '@/lib/units/constants';
+import type { AnswerFeed } from './answer-slot';
+import { HourPanel } from './hour-panel';
+import { spokenHour } from './hour-words';
+import { MonthFigure } from './month-figures';
+import { YearTable } from './year-table';
+
+/** 26 February, 13:00: a bright hour of late winter, when sun, store and backup all have their part. */
+const FIRST_CURSOR_HOUR = 56 * HOURS_PER_DAY + 13;
+const ROW_PX = 9;
+
+const READINGS: readonly { value: ReadingId; label: string }[] = [
+  { value: 'carrier', label: 'Who carried the house' },
+  ...BAND_READINGS.map(({ id, label }) => ({ value: id, label })),
+];
+
+interface StudyPictureProps {
+  feed: AnswerFeed;
+  answer: StudyAnswer | undefined;
+  site: Site;
+  firstDay: number;
+  onFirstDay(firstDay: number): void;
+  /** the right-hand part of the lower half */
+  levers: ReactNode;
+}
+
+/** The mosaic over the whole page, and what hangs on its cursor: the hour and the fifteen days round it. */
+export function StudyPicture({ feed, answer, site, firstDay, onFirstDay, levers }: StudyPictureProps) {
+  const [reading, setReading] = useState<ReadingId>('carrier');
+  const [hour, setHour] = useState(FIRST_CURSOR_HOUR);
+  const [moved, setMoved] = useState('');
+  const [asTable, setAsTable] = useState(false);
+  const months = useMemo(
+    () =>
+      answer &&
+      monthOrder(firstDay).map((month) => <MonthFigure key={month} month={answer.result.months[month]!} />),
+    [answer, firstDay],
+  );
+  const start = loupeStart(Math.floor(hour / HOURS_PER_DAY), firstDay);
+
+  function onMove(next: number) {
+    setHour(next);
+    if (answer) setMoved(spokenHour(answer, next));
+  }
+
+  return (
+    <>
+      <div className="mt-3 grid gap-x-7 gap-y-4 lg:grid-cols-[minmax(0,1fr)_204px]">
+        <div>
+          <div className="mb-2 flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1 sm:pl-8">
+            <Segmented
+              label="Reading of the stones"
+              options={READINGS}
+              value={reading}
+              onChange={(next) => setReading(next)}
+            />
+            <p className="flex flex-wrap gap-x-2 text-note text-muted">
+              {firstDay === FIRST_OF_JULY ? 'July to June, winter in the middle.' : 'January to December.'}
+              <button
+                type="button"
+                className="word text-ink"
+                onClick={() => onFirstDay(firstDay === FIRST_OF_JULY ? 0 : FIRST_OF_JULY)}
+              >
+                {firstDay === FIRST_OF_JULY ? 'January to December' : 'July to June'}
+              </button>
+              <button
+                type="button"
+                className="word text-ink"
+                aria-pressed={asTable}
+                onClick={() => setAsTable(!asTable)}
+              >
+                Table
+              </button>
+            </p>
+          </div>
+          <Mosaic
+            feed={feed}
+            reading={reading}
+            firstDay={firstDay}
+            site={site}
+            rowPx={ROW_PX}
+            label="Mosaic of the year, one stone per hour"
+            cursor={{ hour, spoken: moved, onMove }}
+            bracket={[start, start + LOUPE_DAYS]}
+            months={months ?? []}
+            monthsUnit="kWh"
+          />
+          {asTable && answer && (
+            <div className="mt-4">
+              <YearTable result={answer.result} firstDay={firstDay} />
+            </div>
+          )}
+        </div>
+        <div className="lg:pt-12">
+          <Legend reading={reading} result={answer?.result} />
+        </div>
+      </div>
+      <div className="mt-4 grid gap-x-7 gap-y-7 pt-3 rule-ink sm:grid-cols-[minmax(0,1fr)_212px] lg:grid-cols-[minmax(0,47fr)_212px_minmax(0,36fr)]">
+        <HourPanel answer={answer} hour={hour} />
+        <section aria-labelledby="loupe-heading">
+          <h2 id="loupe-heading" className="mb-2">
+            Fifteen days
+          </h2>
+          <Loupe feed={feed} reading={reading} firstDay={firstDay} hour={hour} onMove={onMove} />
+        </section>
+        <div className="sm:col-span-2 lg:col-span-1">{levers}</div>
+      </div>
+    </>
+  );
+}
