@@ -41,6 +41,8 @@ const SCREED_AROUND_PIPE_MM = 20;
 const FRICTION_WATER_C = 30;
 const PIPE_ROUGHNESS_M = 1.5e-6;
 const LOOP_FITTINGS = 12;
+/** Outer steps of a quarter of an hour. */
+const STEPS_PER_HOUR = 4;
 /** A run is given up beyond this many sub-steps; an ordinary design takes about 50,000. */
 const SUB_STEP_CAP = 4_000_000;
 const KEPT = 12;
@@ -99,6 +101,7 @@ export class PlanBuilder {
       ...this.housePlan(house, design),
       columns,
       theta: numerics.theta,
+      stepsPerHour: STEPS_PER_HOUR,
       subStepCap: SUB_STEP_CAP,
       hasArray,
       array: arrayInput(design),

@@ -29,6 +29,8 @@ export interface PlanColumns {
 export interface Plan {
   columns: PlanColumns;
   theta: number;
+  /** outer steps of an hour: 4, or 720 for the fine run that judges them */
+  stepsPerHour: number;
   /** sub-steps after which the run is given up */
   subStepCap: number;
 

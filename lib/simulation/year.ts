@@ -1,5 +1,5 @@
 /**
- * The year: 8,760 hours in outer steps of a quarter of an hour (house, thermostat, emitters, taps); inside each
+ * The year: 8,760 hours in outer steps (a quarter of an hour by default) (house, thermostat, emitters, taps); inside each
  * of them array and store advance by sub-steps that end at the next switch of the pump, at a share θ of a layer's
  * flush, or at the end of the step. No allocation inside.
  */
@@ -13,8 +13,6 @@ import type { Plan } from './plan';
 import { StoreLayers } from './store-layers';
 import { Tally } from './tally';
 
-const STEPS_PER_HOUR = 4;
-const STEP_S = SECONDS_PER_HOUR / STEPS_PER_HOUR;
 /** Switches of the pump within one step after which its state is held to the end of the step. */
 const SWITCH_CAP = 60;
 const TIME_TOLERANCE_S = 1e-7;
@@ -69,6 +67,8 @@ export class YearState {
 export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus {
   const { network, store, loop } = state;
   const flows = store.flows;
+  const stepsPerHour = plan.stepsPerHour;
+  const stepS = SECONDS_PER_HOUR / stepsPerHour;
   const columns = plan.columns;
   const { theta, roomSetC, ratedW, hasArray, storeLimitC, loopKgPerS, floorWPerK } = plan;
   const floorShareUp = 1 - plan.floorDownward;
@@ -103,7 +103,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
     if (plan.windowOpening) state.windowsOpen = network.airC > OPENING_C && outdoorC < network.airC;
     const film = hasFloor ? plan.floorAreaM2 * floorSurfaceCoefficient(network.slabC - network.surfaceC) : 0;
     const ventilation = state.windowsOpen ? OPENING_FACTOR * plan.ventilationWPerK : plan.ventilationWPerK;
-    network.prepare(ventilation, film, STEP_S);
+    network.prepare(ventilation, film, stepS);
 
     const gains = 0.5 * internalW + windowSunW;
     const gainToSurface = network.gainToSurface * gains;
@@ -132,7 +132,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
     let returnSum = 0;
     let dutySum = 0;
 
-    for (let step = 0; step < STEPS_PER_HOUR; step++) {
+    for (let step = 0; step < stepsPerHour; step++) {
       const toAir = storeInside ? gainToAir + storeLossW : gainToAir;
       network.solve(outdoorC, outdoorC, toAir, gainToSurface, gainToMass, 0);
 
@@ -174,7 +174,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
       }
 
       // array and store
-      let rest = STEP_S;
+      let rest = stepS;
       let switches = 0;
       let storeHeatJ = 0;
       let tapHeatJ = 0;
@@ -263,13 +263,13 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
       }
 
       // what the store really gave, the backup on top of it, and the house
-      const storeW = storeHeatJ / STEP_S;
-      const tapStoreW = tapHeatJ / STEP_S;
+      const storeW = storeHeatJ / stepS;
+      const tapStoreW = tapHeatJ / stepS;
       const tapBackupW = Math.min(ratedW, Math.max(0, tapLoadW - tapStoreW));
       const tapShortW = Math.max(0, tapLoadW - tapStoreW - tapBackupW);
       const backupW = Math.min(Math.max(0, ratedW - tapBackupW), Math.max(0, demandW - storeW));
       const givenW = storeW + backupW;
-      storeLossW = lossJ / STEP_S;
+      storeLossW = lossJ / stepS;
       const insideW = storeInside ? storeLossW : 0;
       let downwardW = 0;
       if (plan.ideal) {
@@ -305,7 +305,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
         unmetW,
         downwardW,
         storeLossW,
-        STEP_S,
+        stepS,
       );
     }
     tally.closeHour(h, state, plan, supplySum, returnSum, dutySum);
