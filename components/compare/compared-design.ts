@@ -1,0 +1,102 @@
+import { HOT_STONE, packCarriers } from '@/components/mosaic/stones';
+import { annuityFactor } from '@/lib/economics/annuity';
+import { designCost } from '@/lib/economics/design-cost';
+import type { ReceiptKind } from '@/lib/economics/cost-of-heat';
+import type { DesignRecord } from '@/lib/schemas/design';
+import type { HouseRecord } from '@/lib/schemas/house';
+import type { Prices } from '@/lib/schemas/prices';
+import type { YearResult } from '@/lib/simulation/results';
+import { HOURS_PER_YEAR } from '@/lib/units/constants';
+
+/** What a comparison shows of one design: plain figures that a page can send to the browser. */
+export interface ComparedDesign {
+  id: string;
+  name: string;
+  areaM2: number;
+  cover: DesignRecord['collector']['cover'];
+  volumeL: number;
+  weatherName: string;
+  synthetic: boolean;
+  roomSetC: number;
+  /** one byte per hour: index into the carriers, or the mark of an empty array too hot [8760] */
+  stones: Uint8Array;
+  /** solar fraction [-] */
+  solarShare: number;
+  solarKwh: number;
+  /** heat that the backup gives [kWh] */
+  backupHeatKwh: number;
+  boughtKwh: number;
+  unmetKwh: number;
+  /** cost of solar heat [money/kWh]; NaN without any */
+  costPerKwh: number;
+  toBuild: number;
+  /** what a year costs to run: fuel, pump, upkeep and the yearly share of replacements [money/year] */
+  runningPerYear: number;
+  replaces: boolean;
+  /** hours in which the empty array is too hot for one of its parts */
+  hotHours: number;
+  /** the part that is worst off when the array stands dry; undefined when all bear it */
+  hotPart: { material: string; limitC: number; hottestC: number; hours: number } | undefined;
+  /** cost of a kilowatt hour, line by line [money/kWh] */
+  receipt: { kind: ReceiptKind; label: string; perKwh: number }[];
+  ownHours: number;
+  /** a useful kilowatt hour from the backup [money/kWh] */
+  backupPerKwh: number;
+}
+
+function worstPart(result: YearResult): ComparedDesign['hotPart'] {
+  const [worst] = result.dryParts
+    .filter((part) => part.hoursAboveShort > 0)
+    .sort((a, b) => b.hoursAboveShort - a.hoursAboveShort);
+  return (
+    worst && {
+      material: worst.material,
+      limitC: worst.shortTermLimitC,
+      hottestC: worst.hottestC,
+      hours: worst.hoursAboveShort,
+    }
+  );
+}
+
+/** Draws the figures of a comparison from one simulated year. */
+export function comparedDesign(
+  id: string,
+  design: DesignRecord,
+  house: HouseRecord,
+  prices: Prices,
+  result: YearResult,
+): ComparedDesign {
+  const { year } = result;
+  const cost = designCost(design, prices, result, house.backup.seasonalEfficiency);
+  const stones = new Uint8Array(HOURS_PER_YEAR);
+  packCarriers(result.columns, stones);
+  const presentUpkeep = cost.heat.receipt
+    .filter(({ kind }) => kind === 'replacement' || kind === 'residual' || kind === 'upkeep')
+    .reduce((sum, { presentValue }) => sum + presentValue, 0);
+  return {
+    id,
+    name: design.name,
+    areaM2: design.array.areaM2,
+    cover: design.collector.cover,
+    volumeL: design.store.volumeL,
+    weatherName: result.weatherName,
+    synthetic: result.synthetic,
+    roomSetC: house.roomSetC,
+    stones,
+    solarShare: year.fractions.solar,
+    solarKwh: year.solarHeatingKwh + year.solarTapKwh,
+    backupHeatKwh: year.backupHeatingKwh + year.backupTapKwh,
+    boughtKwh: year.boughtKwh,
+    unmetKwh: year.unmetKwh,
+    costPerKwh: cost.heat.perKwh,
+    toBuild: cost.toBuild,
+    runningPerYear:
+      cost.boughtMoneyPerYear + presentUpkeep * annuityFactor(prices.realRate / 100, prices.years),
+    replaces: design.collector.replacements.length > 0 && design.array.areaM2 > 0,
+    hotHours: stones.reduce((sum, stone) => sum + (stone === HOT_STONE ? 1 : 0), 0),
+    hotPart: worstPart(result),
+    receipt: cost.heat.receipt.map(({ kind, label, perKwh }) => ({ kind, label, perKwh })),
+    ownHours: cost.ownHours,
+    backupPerKwh: cost.backupHeatPerKwh,
+  };
+}
