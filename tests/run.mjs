@@ -1,6 +1,5 @@
 import '../db/local/node-version.mjs';
 import { randomUUID } from 'node:crypto';
-import { randomBytes } from 'node:crypto';
 import { closeSync, openSync, rmSync } from 'node:fs';
 import path from 'node:path';
 import { ensureBuild } from '../db/local/build.mjs';
@@ -33,16 +32,17 @@ async function main() {
   let server;
   try {
     assertWritable();
-    const chromium = await withLock(
+    const prepared = await withLock(
       localPath('start-lock'),
       async () => {
+        const chromium = await ensureChromium({ install, signal });
+        server = await openDatabaseServer({ install, signal });
         await ensurePackages(signal);
-        return ensureChromium({ install, signal });
+        return { chromium, server };
       },
       { signal, onWait: () => say('Another start or test run prepares this folder: waiting for it …') },
     );
-    server = await openDatabaseServer({ install, signal });
-    const results = await runStages({ chromium, server, signal });
+    const results = await runStages({ ...prepared, signal });
     signal.throwIfAborted();
     const total = sum(results);
     say(`\nAll of it took ${Math.round((Date.now() - began) / 1000)} s.`);
@@ -72,6 +72,8 @@ async function runStages({ chromium, server, signal }) {
   const adminUrl = server.url('postgres');
   const env = {
     ...process.env,
+    // Tools that colour their words even in a file make a log hard to read.
+    ...(process.stdout.isTTY ? {} : { NO_COLOR: '1' }),
     CHROMIUM: chromium,
     TEPIDARIUM_ADMIN_URL: adminUrl,
     NEXT_TELEMETRY_DISABLED: '1',

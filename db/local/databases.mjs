@@ -1,8 +1,18 @@
 import { setTimeout as sleep } from 'node:timers/promises';
+import { Refusal } from './say.mjs';
 
 const DUPLICATE_DATABASE = '42P04';
 const STARTING_UP = '57P03';
 const PATIENCE_MS = 30_000;
+
+/** Refuses in words a server that does not let one in. @param {string} url */
+export async function assertReachable(url) {
+  try {
+    await withClient(url, () => undefined);
+  } catch (error) {
+    throw new Refusal(`DATABASE_URL names a database that cannot be opened: ${error.message || error.code}`);
+  }
+}
 
 /** Makes the database unless it exists. @param {string} adminUrl any database of the server @param {string} name */
 export async function ensureDatabase(adminUrl, name) {

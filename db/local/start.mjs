@@ -1,7 +1,7 @@
 import './node-version.mjs';
 import { ensureBuild } from './build.mjs';
 import { holdCluster } from './cluster.mjs';
-import { ensureDatabase } from './databases.mjs';
+import { assertReachable, ensureDatabase } from './databases.mjs';
 import { withLock } from './lock.mjs';
 import { assertWritable } from './ownership.mjs';
 import { ensurePackages } from './packages.mjs';
@@ -40,8 +40,9 @@ async function main() {
     await withLock(
       localPath('start-lock'),
       async () => {
-        await ensurePackages(signal);
         database = await openDatabase({ install: !flags.includes('--no-install'), signal });
+        await ensurePackages(signal);
+        await database.ensure();
         await migrate(database.url, signal);
         await seed(database.url, signal);
         if (!development) await ensureBuild(signal);
@@ -71,13 +72,13 @@ function portWanted() {
 }
 
 async function openDatabase({ install, signal }) {
-  if (process.env.DATABASE_URL) {
+  const external = process.env.DATABASE_URL;
+  if (external) {
     say('Using the database of DATABASE_URL.');
-    return { url: process.env.DATABASE_URL, release: () => Promise.resolve() };
+    return { url: external, ensure: () => assertReachable(external), release: () => Promise.resolve() };
   }
-  const cluster = await holdCluster({ install, signal });
-  await ensureDatabase(cluster.url('postgres'), DATABASE);
-  return { url: cluster.url(DATABASE), release: cluster.release };
+  const { url, release } = await holdCluster({ install, signal });
+  return { url: url(DATABASE), ensure: () => ensureDatabase(url('postgres'), DATABASE), release };
 }
 
 async function serveOnFreePort(firstPort, { databaseUrl, development, signal }) {
