@@ -1,5 +1,6 @@
 import Link from 'next/link';
 import { Logo } from './logo';
+import { SiteNav } from './site-nav';
 
 /** The running head: mark and name lead to the start page, the rest to the pages that exist. */
 export function SiteHead() {
@@ -12,15 +13,7 @@ export function SiteHead() {
         <Logo />
         Tepidarium
       </Link>
-      <nav aria-label="Main" className="ml-auto">
-        <ul className="flex flex-wrap items-center gap-x-5">
-          <li>
-            <Link href="/sign-in" className="inline-flex min-h-9 items-center">
-              Sign in
-            </Link>
-          </li>
-        </ul>
-      </nav>
+      <SiteNav />
     </header>
   );
 }

@@ -8,7 +8,7 @@ import { notFound, withDesign, withProject } from './authorise';
 import { conflict } from './conflict';
 import { database } from './database';
 import { yearOfDesign } from './design-run';
-import { parseInput } from './parse-input';
+import { parseInput, parseVersioned } from './parse-input';
 
 /** Adds a design to the project. */
 export function createDesign(
@@ -45,7 +45,7 @@ export function saveDesign(
   version: number,
 ): Promise<Answer<SavedDesign> | Conflict<DesignRecord>> {
   return withDesign(designId, async (design, account) => {
-    const input = parseInput(designSchema, data);
+    const input = parseVersioned(designSchema, data, version);
     if (!input.ok) return input;
     const saved = await database()
       .transaction()

@@ -1,5 +1,5 @@
 import 'server-only';
-import type { z } from 'zod';
+import { z } from 'zod';
 import type { Answer } from '@/lib/schemas/answer';
 
 /** Checks what a client sent; the first fault comes back with its words and its place. */
@@ -13,4 +13,16 @@ export function parseInput<S extends z.ZodType>(schema: S, input: unknown): Answ
     message: issue?.message ?? 'This input does not fit.',
     field: issue?.path.map(String).join('.') || undefined,
   };
+}
+
+const versionSchema = z.int({ error: 'Reload this page: it does not say which version it shows.' });
+
+/** The same for a thing that is saved over the version that a client has seen. */
+export function parseVersioned<S extends z.ZodType>(
+  schema: S,
+  input: unknown,
+  version: unknown,
+): Answer<{ data: z.output<S> }> {
+  const seen = parseInput(versionSchema, version);
+  return seen.ok ? parseInput(schema, input) : seen;
 }

@@ -24,7 +24,7 @@ import { asAccount, withProject } from './authorise';
 import { conflict } from './conflict';
 import { database } from './database';
 import { hashOfDesign, summaryOfRun } from './design-run';
-import { parseInput } from './parse-input';
+import { parseInput, parseVersioned } from './parse-input';
 
 const projectName = z.object({ name: shortName('Project', 'My house') });
 
@@ -132,7 +132,7 @@ export function saveHouse(
   version: number,
 ): Promise<Answer<{ version: number }> | Conflict<HouseRecord>> {
   return withProject(projectId, async (project) => {
-    const input = parseInput(houseSchema, data);
+    const input = parseVersioned(houseSchema, data, version);
     if (!input.ok) return input;
     const saved = await database()
       .transaction()
@@ -152,7 +152,7 @@ export function savePrices(
   version: number,
 ): Promise<Answer<{ version: number }> | Conflict<Prices>> {
   return withProject(projectId, async (project) => {
-    const input = parseInput(pricesSchema, data);
+    const input = parseVersioned(pricesSchema, data, version);
     if (!input.ok) return input;
     const saved = await updatePrices(database(), project.id, input.data, version);
     if (saved) return { ok: true as const, version: saved.version };

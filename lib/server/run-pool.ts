@@ -1,5 +1,4 @@
 import 'server-only';
-import path from 'node:path';
 import { pathToFileURL } from 'node:url';
 import { Worker } from 'node:worker_threads';
 import type { Answer, Refusal } from '@/lib/schemas/answer';
@@ -59,7 +58,7 @@ export function createRunPool({ script, threads, queueLength, budgetMs }: RunPoo
 
   function start(): Worker {
     // Paths are put together at run time: the bundler must leave the scripts to the thread's own loader.
-    const inApplication = (file: string) => pathToFileURL(path.join(process.cwd(), ...file.split('/')));
+    const inApplication = (file: string) => pathToFileURL(`${process.cwd()}/${file}`);
     const worker = new Worker(inApplication(BOOT), {
       execArgv: [],
       workerData: { script: inApplication(script).href },

@@ -96,6 +96,9 @@ describe.skipIf(!hasPostgres)('projects', { timeout: 30_000 }, () => {
       message: 'Tilt: type 25 to 90 °.',
       field: 'array.tiltDeg',
     });
+    expect(await saveHouse(projectId, house, 'latest' as unknown as number)).toMatchObject({
+      code: 'invalid',
+    });
     expect(await saveHouse(projectId, { nonsense: true }, before.houseVersion)).toMatchObject({
       code: 'invalid',
     });

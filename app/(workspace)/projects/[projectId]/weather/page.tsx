@@ -1,7 +1,7 @@
 import type { Metadata } from 'next';
-import { readProject } from '@/lib/server/projects';
 import { listWeatherYears } from '@/lib/server/weather-years';
 import { Refused } from '../../../_components/refused';
+import { projectOf } from '../_components/project-of';
 import { WeatherChoices } from './_components/weather-choices';
 import { WeatherUpload } from './_components/weather-upload';
 
@@ -14,7 +14,7 @@ interface WeatherPageProps {
 export default async function WeatherPage({ params }: WeatherPageProps) {
   const { projectId } = await params;
   const from = `/projects/${projectId}/weather`;
-  const [project, years] = await Promise.all([readProject(projectId), listWeatherYears(projectId)]);
+  const [project, years] = await Promise.all([projectOf(projectId), listWeatherYears(projectId)]);
   if (!project.ok) return <Refused refusal={project} from={from} />;
   if (!years.ok) return <Refused refusal={years} from={from} />;
   return (

@@ -48,7 +48,7 @@ export function WeatherUpload({ projectId }: { projectId: string }) {
         id="weather-file"
         type="file"
         accept=".epw,.csv,.CSV,.EPW,text/csv,text/plain"
-        className="field w-full max-w-[32rem]"
+        className="field w-full max-w-[32rem] file:mr-3 file:cursor-pointer file:border-0 file:bg-transparent file:p-0 file:text-ink file:underline file:underline-offset-4"
         aria-describedby="weather-file-note"
         onChange={(event) => {
           const file = event.target.files?.[0];
