@@ -7,6 +7,8 @@ import { hydraulicsRows } from './hydraulics-rows';
 import { moneyRows } from './money-rows';
 import type { ReferenceRow } from './reference-row';
 import { storeAndWaterRows } from './store-and-water-rows';
+import { sunRows } from './sun-rows';
+import { systemRows } from './system-rows';
 
 const rows: ReferenceRow[] = [
   ...collectorRows,
@@ -16,6 +18,8 @@ const rows: ReferenceRow[] = [
   ...buildingRows,
   ...houseRows,
   ...moneyRows,
+  ...sunRows,
+  ...systemRows,
 ];
 const published = rows.filter((row) => row.tier !== 'C');
 const regression = rows.filter((row) => row.tier === 'C');

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { climates, climateYear } from '@/data/climates/climates';
 import { planeYear } from '@/lib/sun/plane-year';
-import { sunYear } from '@/lib/sun/sun-year';
+import { type SunYear, sunYear } from '@/lib/sun/sun-year';
 import { DAYS_IN_MONTH, MONTH_START_HOUR } from '@/lib/units/constants';
 import { clearnessShape, clearnessShare, maxDailyClearness } from '@/lib/weather/daily-clearness';
 import { monthlyClearness, type MonthlyClimate } from '@/lib/weather/monthly-climate';
@@ -31,6 +31,29 @@ function lagOne(values: ArrayLike<number>): number {
 
 function monthSlices(values: Float64Array): Float64Array[] {
   return DAYS_IN_MONTH.map((_, m) => values.subarray(MONTH_START_HOUR[m]!, MONTH_START_HOUR[m + 1]!));
+}
+
+/** Clearness of each hour less that of its day and the mean of that difference in month and hour; NaN near the horizon. */
+function clearnessStray(year: WeatherYear, sun: SunYear): Float64Array {
+  const stray = new Float64Array(8760).fill(NaN);
+  for (let day = 0; day < 365; day++) {
+    const hours = Array.from({ length: 24 }, (_, i) => 24 * day + i);
+    const outside = hours.map(
+      (h) => sun.extraterrestrialNormalWm2[h]! * Math.max(0, sun.cosZenith[h]!) * sun.sunlitFraction[h]!,
+    );
+    const ofDay = mean(hours.map((h) => year.globalWm2[h]!)) / mean(outside);
+    hours.forEach((h, i) => {
+      if (sun.zenithDeg[h]! < 80) stray[h] = year.globalWm2[h]! / outside[i]! - ofDay;
+    });
+  }
+  monthSlices(stray).forEach((month) => {
+    for (let hour = 0; hour < 24; hour++) {
+      const same = Array.from(month.keys()).filter((h) => h % 24 === hour && !Number.isNaN(month[h]!));
+      const profile = mean(same.map((h) => month[h]!));
+      for (const h of same) month[h]! -= profile;
+    }
+  });
+  return stray;
 }
 
 describe('distribution of daily clearness', () => {
@@ -111,6 +134,24 @@ describe.each([...climates, chicagoMeans, southern])('synthetic year: $name, $la
     });
     expect(lagOne(anomaly)).toBeGreaterThan(0.1);
     expect(lagOne(anomaly)).toBeLessThan(0.4);
+  });
+
+  it('strings hours together as weather does', () => {
+    // lag-1 of the hours' clearness about the mean profile of their month: .25-.6 asked, .26-.79 in measured years
+    const stray = clearnessStray(year, sun);
+    const pairs = Array.from(stray.keys()).filter((h) => stray[h - 1]! * stray[h]! >= -1);
+    const products = mean(pairs.map((h) => stray[h]! * stray[h - 1]!));
+    const squares = mean(pairs.map((h) => stray[h]! ** 2));
+    expect(products / squares).toBeGreaterThan(0.25);
+    expect(products / squares).toBeLessThan(0.6);
+  });
+
+  it('has days that are warm and cold in spells', () => {
+    const days = Array.from({ length: 365 }, (_, d) => mean(year.dryBulbC.subarray(24 * d, 24 * d + 24)));
+    const season = days.map((_, d) => mean(Array.from({ length: 61 }, (_, i) => days[(d + i + 335) % 365]!)));
+    const lag = lagOne(days.map((day, d) => day - season[d]!));
+    expect(lag).toBeGreaterThan(0.42);
+    expect(lag).toBeLessThan(0.75);
   });
 
   it('keeps the dew point below the air and the sky colder than the air', () => {
