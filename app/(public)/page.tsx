@@ -19,7 +19,7 @@ const DOORS = [
   {
     title: 'I advise',
     text: 'Homemade and factory-made side by side: the same house, the same year, the difference in words.',
-    link: 'See two designs compared',
+    link: 'See three designs compared',
     href: '/demonstration/compare',
   },
 ] as const;
@@ -35,7 +35,7 @@ export default function StartPage() {
           <br />
           laid hour by hour.
         </h1>
-        <p className="max-w-[38rem] font-display text-h2 leading-7.5 lg:max-w-[37rem]">
+        <p className="max-w-[40rem] font-display text-h2 leading-7.5">
           Solar heating for one house: film over soft mats or factory plates, a store, a warm floor. Move a
           lever and all 8&#8239;760 hours are worked again.
         </p>

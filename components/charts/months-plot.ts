@@ -25,7 +25,7 @@ function bars(months: readonly EnergyRow[], order: readonly number[]): MonthBar[
 /** The hatch of backup, as on the large stones. */
 function hatchMark(document: Document): SVGElement {
   const holder = document.createElementNS('http://www.w3.org/2000/svg', 'defs');
-  holder.innerHTML = `<pattern id="${HATCH_ID}" width="5" height="5" patternUnits="userSpaceOnUse" patternTransform="rotate(45)"><rect width="5" height="5" fill="var(--color-backup)"/><line x1="0" x2="0" y2="5" stroke="var(--color-paper)" stroke-width="1.6"/></pattern>`;
+  holder.innerHTML = `<pattern id="${HATCH_ID}" width="5" height="5" patternUnits="userSpaceOnUse" patternTransform="rotate(45)"><rect width="5" height="5" fill="var(--color-backup)"/><line x1="0" x2="0" y2="5" stroke="var(--color-paper)" stroke-width="1.1" stroke-opacity="0.6"/></pattern>`;
   return holder;
 }
 

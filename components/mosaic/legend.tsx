@@ -9,32 +9,36 @@ interface LegendRow {
   key: string;
   swatches: ReactNode;
   name: string;
+  /** where there is little room */
+  short?: string;
   hours: number | undefined;
 }
 
-const CARRIER_ROWS: readonly { name: string; carriers: readonly number[] }[] = [
-  { name: 'sun, straight in', carriers: [1] },
-  { name: 'sun from the store', carriers: [2] },
-  { name: 'sun and backup', carriers: [3, 4] },
-  { name: 'backup', carriers: [5] },
-  { name: 'nothing needed', carriers: [0] },
+const CARRIER_ROWS: readonly { name: string; short: string; carriers: readonly number[] }[] = [
+  { name: 'sun, straight in', short: 'straight in', carriers: [1] },
+  { name: 'sun from the store', short: 'from the store', carriers: [2] },
+  { name: 'sun and backup', short: 'sun, backup', carriers: [3, 4] },
+  { name: 'backup', short: 'backup', carriers: [5] },
+  { name: 'nothing needed', short: 'not needed', carriers: [0] },
 ];
 const NOT_MET = 6;
 
 function carrierRows(result: YearResult | undefined): LegendRow[] {
   const hours = result?.year.carrierHours;
-  const row = (name: string, carriers: readonly number[]): LegendRow => ({
+  const row = (name: string, short: string, carriers: readonly number[]): LegendRow => ({
     key: name,
+    short,
     swatches: carriers.map((carrier) => <StoneSwatch key={carrier} stone={carrier} />),
     name,
     hours: hours && carriers.reduce((sum, carrier) => sum + (hours[carrier] ?? 0), 0),
   });
-  const rows = CARRIER_ROWS.map(({ name, carriers }) => row(name, carriers));
-  if (hours?.[NOT_MET]) rows.push(row('not warm enough', [NOT_MET]));
+  const rows = CARRIER_ROWS.map(({ name, short, carriers }) => row(name, short, carriers));
+  if (hours?.[NOT_MET]) rows.push(row('not warm enough', 'too cold', [NOT_MET]));
   rows.push({
     key: 'hot',
     swatches: <StoneSwatch stone={7} />,
     name: 'empty, too hot',
+    short: 'too hot, dry',
     hours: result?.year.overLimitHours,
   });
   return rows;
@@ -71,9 +75,10 @@ export function Legend({ reading, result }: { reading: ReadingId; result: YearRe
     <div>
       <ul className="grid-cols-2 gap-x-4 max-lg:grid" aria-label="Stones and their hours">
         {rows.map((row) => (
-          <li key={row.key} className="flex items-center gap-x-2 py-0.5 rule-hair">
-            <span className="flex w-8 shrink-0 gap-px">{row.swatches}</span>
-            <span className="grow">{row.name}</span>
+          <li key={row.key} className="flex items-center gap-x-1 py-0.5 rule-hair">
+            <span className="flex w-7.5 shrink-0 gap-px">{row.swatches}</span>
+            <span className="grow max-sm:hidden">{row.name}</span>
+            <span className="grow sm:hidden">{row.short ?? row.name}</span>
             <span className="whitespace-nowrap tabular-nums">
               {row.hours === undefined ? '–' : withUnit(formatFixed(row.hours), 'h')}
             </span>

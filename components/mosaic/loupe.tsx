@@ -41,10 +41,11 @@ export function Loupe({ feed, reading, firstDay, hour, onMove }: LoupeProps) {
   const column = columnOfDay(day, firstDay) - start;
   const side = grid && grid.layout.x[1]! / grid.pixelRatio;
   return (
-    <div className="max-w-[212px]" style={{ width: LOUPE_DAYS * STONE_PX + 32 }}>
+    <div className="w-[212px]">
       <div className="flex gap-1">
         <div
-          className="relative grow cursor-crosshair"
+          className="relative shrink-0 cursor-crosshair"
+          style={{ width: LOUPE_DAYS * STONE_PX }}
           onPointerDown={(event) => {
             const box = event.currentTarget.getBoundingClientRect();
             const days = Math.floor(((event.clientX - box.left) / box.width) * LOUPE_DAYS);

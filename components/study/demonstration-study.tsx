@@ -5,6 +5,7 @@ import { useMemo, useState } from 'react';
 import { Segmented } from '@/components/ui/segmented';
 import type { DesignRecord } from '@/lib/schemas/design';
 import { readAddress } from './address';
+import { designWord } from './design-word';
 import { Study } from './study';
 import type { StudyProps } from './study';
 
@@ -14,27 +15,23 @@ interface DemonstrationStudyProps extends Pick<StudyProps, 'house' | 'prices' | 
   params: readonly (readonly [string, string])[];
 }
 
-/** A design's name as a word of the address. */
-function wordOf({ name }: DesignRecord): string {
-  return name.toLowerCase().replace(/[^a-z0-9]+/g, '-');
-}
-
 /** The study as a sandbox: any of the demonstration's designs, every lever, nothing saved. */
 export function DemonstrationStudy({ house, prices, weather, designs, params }: DemonstrationStudyProps) {
   const [asked] = useState(() => {
     const search = new URLSearchParams(params.map(([name, value]) => [name, value]));
-    const found = designs.findIndex((design) => wordOf(design) === search.get('design'));
+    const found = designs.findIndex((design) => designWord(design) === search.get('design'));
     const place = Math.max(0, found);
     return { place, ...readAddress(search, designs[place]!) };
   });
   const [place, setPlace] = useState(asked.place);
   const saved = designs[place]!;
-  const keptParams = useMemo(() => ({ design: wordOf(saved) }), [saved]);
+  const keptParams = useMemo(() => ({ design: designWord(saved) }), [saved]);
   return (
     <Study
       house={house}
       prices={prices}
       weather={weather}
+      subject={designWord(saved)}
       saved={saved}
       initial={asked.design}
       broken={asked.broken}
@@ -51,7 +48,7 @@ export function DemonstrationStudy({ house, prices, weather, designs, params }: 
             onChange={(index) => setPlace(Number(index))}
           />
           <Link href="/demonstration/compare" className="sm:ml-auto">
-            Compare two designs
+            Compare the designs
           </Link>
         </div>
       }

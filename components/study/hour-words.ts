@@ -73,7 +73,7 @@ export function hourSentence(answer: StudyAnswer, hour: number): string {
   }
   const parts = tooHotParts(answer, hour);
   if (parts.length > 0)
-    sentences.push(`Standing empty, ${parts.join(' and ')} would be hotter than it may be.`);
+    sentences.push(`Standing empty, the ${parts.join(' and the ')} would be hotter than allowed.`);
   return sentences.join(' ');
 }
 

@@ -78,11 +78,11 @@ export function LeverFrame(props: {
 }) {
   return (
     <div className="grid grid-cols-[1fr_8.5rem] items-center gap-x-4 py-2 rule-hair sm:grid-cols-[9.5rem_1fr] sm:items-start">
-      <div className="sm:col-start-1 sm:row-start-1">
-        <span className="block leading-6">{props.name}</span>
-        <span className="block min-h-4.5 text-note text-muted max-sm:hidden">{props.change}</span>
+      <span className="leading-6 sm:col-start-1">{props.name}</span>
+      <div className="sm:col-start-1">
+        {props.field}
+        <span className="block text-note text-muted max-sm:hidden">{props.change}</span>
       </div>
-      <div className="sm:col-start-1 sm:row-start-2">{props.field}</div>
       <div className="col-span-2 sm:col-span-1 sm:col-start-2 sm:row-span-2 sm:row-start-1">
         {props.children}
       </div>

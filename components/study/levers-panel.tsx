@@ -16,13 +16,14 @@ interface LeversPanelProps {
   question: StudyQuestion;
   answer: StudyAnswer | undefined;
   firstDay: number;
+  changed: boolean;
   onChange(design: DesignRecord): void;
   children: ReactNode;
 }
 
 /** Six levers, each with a trace of the heat still bought, all on one vertical scale. */
 export function LeversPanel(props: LeversPanelProps) {
-  const { design, saved, question, answer, firstDay, onChange, children } = props;
+  const { design, saved, question, answer, firstDay, changed, onChange, children } = props;
   const traces = useTraces(question, saved, answer !== undefined);
   const year = answer?.result.year;
   const nowKwh = year && year.backupHeatingKwh + year.backupTapKwh;
@@ -66,7 +67,7 @@ export function LeversPanel(props: LeversPanelProps) {
       />
       <div className="flex flex-wrap items-center gap-x-6 gap-y-2 py-4">
         {children}
-        {design !== saved && (
+        {changed && (
           <button type="button" className="word" onClick={() => onChange(saved)}>
             Back to the saved design
           </button>

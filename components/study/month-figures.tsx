@@ -1,5 +1,7 @@
 import type { EnergyRow } from '@/lib/simulation/results';
-import { formatSignificant } from '@/lib/units/display';
+import { formatFixed, formatSignificant } from '@/lib/units/display';
+
+const figure = (kwh: number) => (kwh < 100 ? formatFixed(kwh) : formatSignificant(kwh, 3));
 
 /** The sun's part of a month's need, under the mosaic: "291 of 299". */
 export function MonthFigure({ month }: { month: EnergyRow }) {
@@ -7,8 +9,8 @@ export function MonthFigure({ month }: { month: EnergyRow }) {
   const need = sun + month.backupHeatingKwh + month.backupTapKwh + month.unmetKwh;
   return (
     <>
-      <strong className="block text-sun-text">{formatSignificant(sun, 3)}</strong>
-      <span className="whitespace-nowrap text-muted">of {formatSignificant(need, 3)}</span>
+      <strong className="block text-sun-text">{figure(sun)}</strong>
+      <span className="whitespace-nowrap text-muted">of {figure(need)}</span>
     </>
   );
 }

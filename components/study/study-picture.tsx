@@ -35,10 +35,20 @@ interface StudyPictureProps {
   onFirstDay(firstDay: number): void;
   /** the right-hand part of the lower half */
   levers: ReactNode;
+  /** below the hour and the fifteen days */
+  months: ReactNode;
 }
 
 /** The mosaic over the whole page, and what hangs on its cursor: the hour and the fifteen days round it. */
-export function StudyPicture({ feed, answer, site, firstDay, onFirstDay, levers }: StudyPictureProps) {
+export function StudyPicture({
+  feed,
+  answer,
+  site,
+  firstDay,
+  onFirstDay,
+  levers,
+  months: monthsSection,
+}: StudyPictureProps) {
   const [reading, setReading] = useState<ReadingId>('carrier');
   const [hour, setHour] = useState(FIRST_CURSOR_HOUR);
   const [moved, setMoved] = useState('');
@@ -67,7 +77,7 @@ export function StudyPicture({ feed, answer, site, firstDay, onFirstDay, levers 
               value={reading}
               onChange={(next) => setReading(next)}
             />
-            <p className="flex flex-wrap gap-x-2 text-note text-muted">
+            <p className="flex flex-wrap items-baseline gap-x-2 text-note text-muted">
               {firstDay === FIRST_OF_JULY ? 'July to June, winter in the middle.' : 'January to December.'}
               <button
                 type="button"
@@ -108,7 +118,7 @@ export function StudyPicture({ feed, answer, site, firstDay, onFirstDay, levers 
           <Legend reading={reading} result={answer?.result} />
         </div>
       </div>
-      <div className="mt-4 grid gap-x-7 gap-y-7 pt-3 rule-ink sm:grid-cols-[minmax(0,1fr)_212px] lg:grid-cols-[minmax(0,47fr)_212px_minmax(0,36fr)]">
+      <div className="mt-4 grid gap-x-7 gap-y-7 pt-3 rule-ink sm:grid-cols-[minmax(0,1fr)_212px] lg:grid-cols-[minmax(0,47fr)_212px_minmax(0,36fr)] lg:grid-rows-[auto_1fr]">
         <HourPanel answer={answer} hour={hour} />
         <section aria-labelledby="loupe-heading">
           <h2 id="loupe-heading" className="mb-2">
@@ -116,7 +126,10 @@ export function StudyPicture({ feed, answer, site, firstDay, onFirstDay, levers 
           </h2>
           <Loupe feed={feed} reading={reading} firstDay={firstDay} hour={hour} onMove={onMove} />
         </section>
-        <div className="sm:col-span-2 lg:col-span-1">{levers}</div>
+        <div className="sm:col-span-2 lg:col-span-1 lg:col-start-3 lg:row-span-2 lg:row-start-1">
+          {levers}
+        </div>
+        <div className="sm:col-span-2">{monthsSection}</div>
       </div>
     </>
   );

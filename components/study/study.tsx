@@ -11,6 +11,7 @@ import { ChecksList } from './checks-list';
 import { BalanceSection, FractionsSection, ReceiptSection } from './figures-section';
 import { LeversPanel } from './levers-panel';
 import { MarginNote } from './margin-note';
+import { sameDesign } from './same-design';
 import { MonthsSection } from './months-section';
 import { StudyPicture } from './study-picture';
 import { winterInTheMiddle } from './study-context';
@@ -25,6 +26,8 @@ export interface StudyProps {
   prices: Prices;
   weather: StudyWeather;
   saved: DesignRecord;
+  /** what the study is about: when it changes, the levers go to its saved design */
+  subject: string;
   /** the design that the address asked for */
   initial: DesignRecord;
   /** parameters of the address that could not be read */
@@ -34,7 +37,7 @@ export interface StudyProps {
   /** choices above the verdict */
   head?: ReactNode;
   /** what can be done with the design as it stands: save it, sign in */
-  actions(design: DesignRecord, changed: boolean): ReactNode;
+  actions(design: DesignRecord, changed: boolean, setDesign: (design: DesignRecord) => void): ReactNode;
 }
 
 const ADDRESS_STILL_MS = 300;
@@ -42,11 +45,11 @@ const FIGURES_STILL_MS = 150;
 
 /** The live study: verdict, mosaic, the hour, the levers, the checks and the figures behind them. */
 export function Study(props: StudyProps) {
-  const { house, prices, weather, saved, initial, broken = [], keptParams, head, actions } = props;
+  const { house, prices, weather, saved, subject, initial, broken = [], keptParams, head, actions } = props;
   const [design, setDesign] = useState(initial);
-  const [base, setBase] = useState(saved);
-  if (base !== saved) {
-    setBase(saved);
+  const [shown, setShown] = useState(subject);
+  if (shown !== subject) {
+    setShown(subject);
     setDesign(saved);
   }
   const [firstDay, setFirstDay] = useState(winterInTheMiddle(weather));
@@ -57,7 +60,7 @@ export function Study(props: StudyProps) {
   const [current, stored] = useYears(questions);
   const { answer, failure, feed, retry } = current!;
   const settled = useSettled(answer, FIGURES_STILL_MS);
-  const changed = design !== saved;
+  const changed = !sameDesign(design, saved);
   useAddress(design, saved, keptParams);
 
   return (
@@ -86,6 +89,7 @@ export function Study(props: StudyProps) {
         site={weather}
         firstDay={firstDay}
         onFirstDay={setFirstDay}
+        months={settled && <MonthsSection result={settled.result} firstDay={firstDay} />}
         levers={
           <>
             <LeversPanel
@@ -94,28 +98,25 @@ export function Study(props: StudyProps) {
               question={questions[0]!}
               answer={answer}
               firstDay={firstDay}
+              changed={changed}
               onChange={setDesign}
             >
-              {actions(design, changed)}
+              {actions(design, changed, setDesign)}
             </LeversPanel>
             <ChecksList findings={answer?.findings} />
           </>
         }
       />
-      {settled && <StudyFigures answer={settled} prices={prices} firstDay={firstDay} />}
+      {settled && <StudyFigures answer={settled} prices={prices} />}
     </div>
   );
 }
 
-function StudyFigures(props: { answer: StudyAnswer; prices: Prices; firstDay: number }) {
-  const { answer, prices, firstDay } = props;
+function StudyFigures({ answer, prices }: { answer: StudyAnswer; prices: Prices }) {
   return (
-    <div className="mt-7 grid gap-7 pt-4 rule-ink lg:grid-cols-[minmax(0,1.5fr)_minmax(0,1fr)_minmax(0,1fr)]">
-      <MonthsSection result={answer.result} firstDay={firstDay} />
-      <div className="grid content-start gap-7">
-        <BalanceSection answer={answer} />
-        <FractionsSection answer={answer} />
-      </div>
+    <div className="mt-7 grid gap-7 pt-4 rule-ink md:grid-cols-2 lg:grid-cols-3">
+      <BalanceSection answer={answer} />
+      <FractionsSection answer={answer} />
       <ReceiptSection answer={answer} prices={prices} />
     </div>
   );

@@ -78,14 +78,15 @@ export function traceRange(traces: Traces, nowKwh: number): readonly [number, nu
 
 const FLAT_SHARE = 1.01;
 
-/** The stretch on which the heat still bought stays within 1 % of its least; undefined when it is no inner stretch. */
+/** The stretch on which the heat still bought stays within 1 % of its least; undefined when it reaches an end. */
 export function flatStretch(
   points: readonly TracePoint[] | undefined,
 ): readonly [number, number] | undefined {
   if (!points || points.length < 3) return undefined;
   const least = Math.min(...points.map((point) => point.kwh));
-  const flat = points.filter((point) => point.kwh <= least * FLAT_SHARE);
-  const first = flat[0]!.value;
-  const last = flat[flat.length - 1]!.value;
-  return first < last && flat.length < points.length ? [first, last] : undefined;
+  const flat = points.map((point) => point.kwh <= least * FLAT_SHARE);
+  const first = flat.indexOf(true);
+  const last = flat.lastIndexOf(true);
+  const inner = first > 0 && last < points.length - 1 && first < last;
+  return inner ? [points[first]!.value, points[last]!.value] : undefined;
 }

@@ -65,9 +65,10 @@ export function formatShare(share: number): string {
   return withUnit(formatFixed(percent, small ? 1 : 0), '%');
 }
 
-/** A number and its unit, which stay together on one line. */
+/** A number and its unit, which stay together on one line; the degree of an angle stands close. */
 export function withUnit(text: string, unit: string): string {
-  return unit ? `${text}${UNIT_SPACE}${unit}` : text;
+  if (!unit) return text;
+  return unit === '°' ? `${text}${unit}` : `${text}${UNIT_SPACE}${unit}`;
 }
 
 /**

@@ -38,6 +38,7 @@ describe('numbers on screen', () => {
 
   it('keeps number and unit together', () => {
     expect(withUnit('24', 'm²')).toBe(`24${nbsp}m²`);
+    expect(withUnit('65', '°')).toBe('65°');
     expect(formatShare(0.2345)).toBe(`23${nbsp}%`);
     expect(formatShare(0.0421)).toBe(`4.2${nbsp}%`);
     expect(formatShare(0)).toBe(`0${nbsp}%`);

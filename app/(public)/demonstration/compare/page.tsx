@@ -1,57 +1,26 @@
 import type { Metadata } from 'next';
 import Link from 'next/link';
-import { comparedDesign } from '@/components/compare/compared-design';
-import { Comparison } from '@/components/compare/comparison';
-import { climateYear } from '@/data/climates/climates';
+import { DemonstrationComparison } from '@/components/study/demonstration-comparison';
+import { designWord } from '@/components/study/design-word';
 import { demonstration } from '@/data/demonstration/larkspur-house';
-import { numericsSchema } from '@/lib/schemas/design-file';
-import { createSimulator } from '@/lib/simulation/simulate';
+import { demonstrationWeather } from '../../_components/demonstration-weather';
 
-export const metadata: Metadata = { title: `${demonstration.house.name}, compared` };
+export const metadata: Metadata = { title: `${demonstration.house.name}, designs compared` };
 
-/** Nothing of it changes: the years are worked once, when the page is built. */
-export const dynamic = 'force-static';
-
-function demonstrationYears() {
-  const { house, prices, designs, climateId } = demonstration;
-  const weather = climateYear(climateId);
-  if (!weather) throw new Error(`The climate ${climateId} of the demonstration is missing.`);
-  const simulator = createSimulator();
-  const numerics = numericsSchema.parse({});
-  const compared = designs.map((design) => {
-    const outcome = simulator.run({ weather, house, design, numerics });
-    if (!outcome.ok) throw new Error(outcome.message);
-    return comparedDesign(design.name, design, house, prices, outcome.result);
-  });
-  return { compared, latitudeDeg: weather.latitudeDeg };
-}
-
-/** The designs of the invented house side by side, without an account. */
+/** Homemade and factory-made side by side, without an account. */
 export default function DemonstrationComparePage() {
-  const { compared, latitudeDeg } = demonstrationYears();
-  const { house, prices } = demonstration;
   return (
-    <>
-      <nav aria-label="Demonstration" className="flex flex-wrap items-center gap-x-6 pt-2">
-        <span>
-          <strong>{house.name}</strong>, <span className="text-muted">an invented house</span>
-        </span>
-        <Link href="/demonstration" className="inline-flex min-h-9 items-center">
-          Study
-        </Link>
-        <span
-          aria-current="page"
-          className="inline-flex min-h-9 items-center border-b-2 border-ink font-strong"
-        >
-          Compare
-        </span>
-      </nav>
-      <Comparison
-        designs={compared}
-        terms={{ currency: prices.currency, realRate: prices.realRate, years: prices.years }}
-        fuel={house.backup.fuel}
-        latitudeDeg={latitudeDeg}
+    <div className="pt-4">
+      <p>
+        <strong>{demonstration.house.name}</strong>, <span className="text-muted">an invented house.</span>{' '}
+        <Link href="/demonstration">Move the levers of one design</Link>
+      </p>
+      <DemonstrationComparison
+        house={demonstration.house}
+        prices={demonstration.prices}
+        weather={demonstrationWeather()}
+        designs={demonstration.designs.map((design) => ({ word: designWord(design), design }))}
       />
-    </>
+    </div>
   );
 }
