@@ -1,4 +1,4 @@
-import { airChangeLoss, elementLoss } from '@/lib/physics/heat-loss';
+import { transmissionWPerK, ventilationWPerK } from '@/lib/physics/design-heat-load';
 import type { HouseRecord } from '@/lib/schemas/house';
 
 /** Where the heat of a house goes [W/K], and what that makes on the design day. */
@@ -21,11 +21,9 @@ const GROUPS: { name: string; kinds: readonly HouseRecord['shell'][number]['kind
 export function houseLoss(house: HouseRecord): HouseLoss {
   const shares = GROUPS.map(({ name, kinds }) => ({
     name,
-    wattsPerK: house.shell
-      .filter(({ kind }) => kinds.includes(kind))
-      .reduce((sum, element) => sum + elementLoss(element), 0),
+    wattsPerK: transmissionWPerK(house.shell.filter(({ kind }) => kinds.includes(kind))),
   }));
-  shares.push({ name: 'air', wattsPerK: airChangeLoss(house.airChangePerH, house.volumeM3) });
+  shares.push({ name: 'air', wattsPerK: ventilationWPerK(house.airChangePerH, house.volumeM3) });
   const wholeWPerK = shares.reduce((sum, share) => sum + share.wattsPerK, 0);
   return {
     shares: shares.filter(({ wattsPerK }) => wattsPerK > 0),

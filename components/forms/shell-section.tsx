@@ -1,6 +1,6 @@
 'use client';
 
-import { elementLoss } from '@/lib/physics/heat-loss';
+import { transmissionWPerK } from '@/lib/physics/design-heat-load';
 import type { HouseRecord } from '@/lib/schemas/house';
 import { formatFixed, formatSignificant, withUnit } from '@/lib/units/display';
 import { get, useFormContext, useFormState } from 'react-hook-form';
@@ -33,7 +33,7 @@ export function ShellSection() {
   const loss = houseLoss(house);
   const sound = house.shell.filter((_, index) => !inError(index));
   const held = house.shell.length - sound.length;
-  const sumWPerK = sound.reduce((sum, element) => sum + elementLoss(element), 0);
+  const sumWPerK = transmissionWPerK(sound);
   return (
     <FormSection id="shell" title="Heat through the shell">
       <RowTable
@@ -51,7 +51,7 @@ export function ShellSection() {
           cell: (index) => {
             const element = house.shell[index];
             if (inError(index) || !element) return <span className="text-muted">held</span>;
-            return formatFixed(elementLoss(element), 1);
+            return formatFixed(transmissionWPerK([element]), 1);
           },
         }}
         totals={

@@ -27,7 +27,7 @@ const foam: Part = {
   place: 'back',
   material: 'EPS',
   longTermLimitC: 75,
-  shortTermLimitC: 95,
+  shortTermLimitC: 85,
 };
 
 const newMat: Replacement = { label: 'new mat', pricePerM2: 9, everyYears: 8 };

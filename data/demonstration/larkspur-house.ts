@@ -20,7 +20,7 @@ const house = houseSchema.parse({
     { name: 'Windows, others', kind: 'window', areaM2: 16, uWPerM2K: 1.6 },
     { name: 'Ground floor slab', kind: 'ground', areaM2: 70, uWPerM2K: 0.36, factor: 0.6 },
   ],
-  airChangePerH: 0.25,
+  airChangePerH: 0.24,
   windows: [
     { name: 'Garden', areaM2: 6, azimuthDeg: 192, gValue: 0.62, shade: 0.8 },
     { name: 'Street', areaM2: 5.1, azimuthDeg: 12, gValue: 0.7, shade: 0.6 },

@@ -68,6 +68,10 @@ export class HouseNetwork {
   private m11 = 0.5;
   private m12 = 0.5;
   private m22 = 0.5;
+  private massRise = 0.5;
+  private slabRise = 0.5;
+  private surfaceRise = 0.5;
+  private rise = 0.5;
 
   /**
    * Coupling coefficients of a house.
@@ -153,9 +157,11 @@ export class HouseNetwork {
   }
 
   /**
-   * Rise of the mean air temperature of a step per full emission.
-   * @param toAirW [W] @param toSurfaceW [W] @param toSlabW [W]
-   * @returns rise [K]
+   * Rise of the mean nodes of a step under added heat, kept for `add`.
+   * @param toAirW [W]
+   * @param toSurfaceW [W]
+   * @param toSlabW [W]
+   * @returns rise of the air [K]
    */
   airRise(toAirW: number, toSurfaceW: number, toSlabW: number): number {
     const shared = (this.airShare * toAirW + toSurfaceW) / this.surfaceSum;
@@ -164,7 +170,20 @@ export class HouseNetwork {
     const mass = this.m11 * right1 + this.m12 * right2;
     const slab = this.m12 * right1 + this.m22 * right2;
     const surface = shared + (this.hMs * mass + this.hFilm * slab) / this.surfaceSum;
-    return (this.hIs * surface + toAirW) / (this.hVe + this.hIs);
+    const air = (this.hIs * surface + toAirW) / (this.hVe + this.hIs);
+    this.massRise = mass;
+    this.slabRise = slab;
+    this.surfaceRise = surface;
+    this.rise = air;
+    return air;
+  }
+
+  /** Adds a share of the heat last given to `airRise` to the step that `solve` has described; the network is linear. */
+  add(share: number): void {
+    this.massMeanC += share * this.massRise;
+    this.slabMeanC += share * this.slabRise;
+    this.surfaceC += share * this.surfaceRise;
+    this.airC += share * this.rise;
   }
 
   /** Moves mass and slab to the end of the step that `solve` has just described. */

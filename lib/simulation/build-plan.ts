@@ -3,6 +3,7 @@ import { slabCapacity, supplyToSlabConductance } from '@/lib/physics/floor';
 import { mainsC, tappingShares } from '@/lib/physics/hot-water';
 import { beamModifier } from '@/lib/physics/incidence-angle';
 import { resetSupplyC } from '@/lib/physics/outdoor-reset';
+import { radiatorHeat } from '@/lib/physics/radiator';
 import { pressureDropPa } from '@/lib/physics/pipe-flow';
 import { frictionHeadM, liftPowerW, runningHeadM } from '@/lib/physics/pump';
 import { layerLossesWPerK } from '@/lib/physics/store-loss';
@@ -28,7 +29,7 @@ import type { WeatherYear } from '@/lib/weather/weather-year';
 import type { Collector, CollectorArray, Design, House, SkyModel } from './design';
 import { dryColumns, type DryColumns } from './dry-hours';
 import { emitterLoop, houseHeat } from './house-heat';
-import type { Plan, PlanColumns } from './plan';
+import { EXCESS_STEP_K, EXCESS_STEPS, type Plan, type PlanColumns } from './plan';
 import type { SimulationInput } from './simulate';
 import { SiteCache } from './site-cache';
 import { monthOf } from './tally';
@@ -70,6 +71,7 @@ export class PlanBuilder {
   private readonly windows = new Memo<Float64Array>();
   private readonly supplies = new Memo<Float64Array>();
   private readonly taps = new Memo<{ tapKgPerS: Float64Array; mainsC: Float64Array }>();
+  private readonly radiators = new Memo<Float64Array>();
   private readonly dryYears = new Memo<DryColumns>();
 
   private siteOf(weather: WeatherYear): { site: SiteCache; id: number } {
@@ -246,9 +248,9 @@ export class PlanBuilder {
         : 0,
       floorAreaM2: hasFloor ? floor.areaM2 : 0,
       floorDownward: floor.downwardLoss,
-      radiatorRatedW: ideal ? 0 : radiators.ratedW,
-      radiatorExponent: radiators.exponent,
-      radiatorKgPerS: loop.radiatorKgPerS,
+      radiatorWPerK: this.radiators.get(JSON.stringify([ideal, radiators, loop.radiatorKgPerS]), () =>
+        radiatorTable(ideal ? 0 : radiators.ratedW, radiators.exponent, loop.radiatorKgPerS),
+      ),
       tapSetC: house.hotWater.setC,
       exchangerEffectiveness: house.hotWater.exchangerEffectiveness,
       ratedW: house.backup.ratedW,
@@ -272,6 +274,17 @@ function windowSun(site: SiteCache, house: House, model: SkyModel): Float64Array
     for (let h = 0; h < HOURS_PER_YEAR; h++) gain[h]! += aperture * plane.totalWm2[h]!;
   }
   return gain;
+}
+
+/** Conductance of the radiators over the excess of the supply: their law needs powers, the loop only this table. */
+function radiatorTable(ratedW: number, exponent: number, kgPerS: number): Float64Array {
+  const table = new Float64Array(EXCESS_STEPS + 2);
+  if (ratedW <= 0) return table;
+  for (let i = 1; i < table.length; i++) {
+    const excessK = i * EXCESS_STEP_K;
+    table[i] = radiatorHeat(ratedW, exponent, excessK, Math.max(NO_FLOW, kgPerS) * CP, 0) / excessK;
+  }
+  return table;
 }
 
 function tapColumns(house: House, south: boolean): { tapKgPerS: Float64Array; mainsC: Float64Array } {

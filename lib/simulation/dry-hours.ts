@@ -1,4 +1,10 @@
-import { backFaceC, dryYear, dryYearFromDeclared, DRY_IRRADIANCE_WM2 } from '@/lib/physics/dry-temperature';
+import {
+  backFaceC,
+  backLossWithFaceLayer,
+  dryYear,
+  dryYearFromDeclared,
+  DRY_IRRADIANCE_WM2,
+} from '@/lib/physics/dry-temperature';
 import { hemisphericalEfficiency } from '@/lib/physics/collector';
 import { countLimitHours } from '@/lib/physics/material-limits';
 import { HOURS_PER_YEAR, MM_PER_M } from '@/lib/units/constants';
@@ -51,7 +57,7 @@ export function dryColumns(
         coverLongwaveTransmittance: dry.coverLongwaveTransmittance,
         coverResistanceM2KPerW: dry.coverResistanceM2KPerW,
         gapM: dry.gapMm / MM_PER_M,
-        backLossWPerM2K: dry.backLossWPerM2K,
+        backLossWPerM2K: backLossWithFaceLayer(dry.backLossWPerM2K, collector.faceLayerM2KPerW),
         tiltDeg: array.tiltDeg,
       },
       {

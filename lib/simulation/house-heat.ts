@@ -1,4 +1,4 @@
-import { airChangeLoss, elementLoss } from '@/lib/physics/heat-loss';
+import { designHeatLoadW, transmissionWPerK, ventilationWPerK } from '@/lib/physics/design-heat-load';
 import { floorConductance } from '@/lib/physics/floor';
 import { radiatorFactor } from '@/lib/physics/radiator';
 import { WATER_SPECIFIC_HEAT_J_PER_KG_K } from '@/lib/physics/water';
@@ -16,7 +16,7 @@ export interface HouseHeat {
 }
 
 /**
- * Heat loss of a house: H_T = Σ A U f, H_ve = ρc n V, Φ_HL = (H_T + H_ve)(θi − θe,d).
+ * Heat loss of a house: H_T = Σ A U f, H_ve = 0.34 n V, Φ_HL = (H_T + H_ve)(θi − θe,d).
  * @param house shell [m², W/(m²K), -], air change [1/h], volume [m³], temperatures [°C]
  * @returns coefficients [W/K] and design heat load [W]
  * @see EN 12831-1:2017, simplified form; ISO 13789 for the coefficients
@@ -24,21 +24,17 @@ export interface HouseHeat {
 export function houseHeat(
   house: Pick<House, 'shell' | 'airChangePerH' | 'volumeM3' | 'roomSetC' | 'designOutdoorC'>,
 ): HouseHeat {
-  let opaque = 0;
-  let window = 0;
-  for (const element of house.shell) {
-    const loss = elementLoss(element);
-    if (element.kind === 'window' || element.kind === 'door') window += loss;
-    else opaque += loss;
-  }
-  const ventilation = airChangeLoss(house.airChangePerH, house.volumeM3);
+  const glazed = house.shell.filter(({ kind }) => kind === 'window' || kind === 'door');
+  const window = transmissionWPerK(glazed);
+  const opaque = transmissionWPerK(house.shell) - window;
+  const ventilation = ventilationWPerK(house.airChangePerH, house.volumeM3);
   const total = opaque + window + ventilation;
   return {
     opaqueWPerK: opaque,
     windowWPerK: window,
     ventilationWPerK: ventilation,
     totalWPerK: total,
-    designLoadW: Math.max(0, total * (house.roomSetC - house.designOutdoorC)),
+    designLoadW: designHeatLoadW(total, house.roomSetC, house.designOutdoorC),
   };
 }
 

@@ -26,6 +26,10 @@ export interface PlanColumns {
   mainsC: Float64Array;
 }
 
+/** Step of the table of radiators and its length: 0 to 80 K. */
+export const EXCESS_STEP_K = 0.5;
+export const EXCESS_STEPS = 160;
+
 export interface Plan {
   columns: PlanColumns;
   theta: number;
@@ -62,9 +66,8 @@ export interface Plan {
   floorWPerK: number;
   floorAreaM2: number;
   floorDownward: number;
-  radiatorRatedW: number;
-  radiatorExponent: number;
-  radiatorKgPerS: number;
+  /** radiators [W/K] by the excess of the supply over the room in steps of `EXCESS_STEP_K`, at the loop's flow */
+  radiatorWPerK: Float64Array;
 
   tapSetC: number;
   exchangerEffectiveness: number;

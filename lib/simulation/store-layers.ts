@@ -34,8 +34,12 @@ export class StoreLayers {
   private readonly predicted: Float64Array;
   private readonly rate: Float64Array;
   private readonly rate2: Float64Array;
+  /** net flow from layer i to layer i + 1 [kg/s] */
+  private readonly down: Float64Array;
   /** loss of each layer [W/K] */
   readonly lossWPerK: Float64Array;
+  /** loss of a layer per kelvin of excess and kelvin of its own [1/s] */
+  private readonly lossPerS: Float64Array;
   private readonly mergedMass: Float64Array;
   private readonly mergedT: Float64Array;
   private readonly mergedCount: Int32Array;
@@ -71,6 +75,8 @@ export class StoreLayers {
     this.predicted = new Float64Array(count);
     this.rate = new Float64Array(count);
     this.rate2 = new Float64Array(count);
+    this.down = new Float64Array(count);
+    this.lossPerS = lossWPerK.map((loss) => (loss * count) / (massKg * CP));
     this.mergedMass = new Float64Array(count);
     this.mergedT = new Float64Array(count);
     this.mergedCount = new Int32Array(count);
@@ -105,40 +111,53 @@ export class StoreLayers {
     return largest > 0 ? (theta * this.layerKg) / largest : Infinity;
   }
 
+  /** Net flows at the interfaces, fixed for both stages of a sub-step. */
+  private settleFlows(): void {
+    const { chargeKgPerS, chargeLevel, heatingKgPerS, returnLevel, tapKgPerS } = this.flows;
+    const down = this.down;
+    for (let i = 0; i < this.count - 1; i++) {
+      let flow = -tapKgPerS;
+      if (chargeLevel <= i) flow += chargeKgPerS;
+      if (returnLevel > i) flow -= heatingKgPerS;
+      down[i] = flow;
+    }
+  }
+
   /** Rates of change [K/s] of all layers at temperatures `t` into `out`. */
   private rates(t: Float64Array, out: Float64Array): void {
     const f = this.flows;
+    const down = this.down;
     const last = this.count - 1;
     const charge = f.chargeKgPerS;
-    const heating = f.heatingKgPerS;
-    const tap = f.tapKgPerS;
     const conduction = this.conductionKgPerS;
-    const loss = this.lossWPerK;
+    const lossPerS = this.lossPerS;
     const room = this.roomC;
     const perLayer = 1 / this.layerKg;
-    const perLayerHeat = perLayer / CP;
     const top = t[0]!;
-    let above = -(heating + tap) * top;
+    let here = top;
+    let above = -(f.heatingKgPerS + f.tapKgPerS) * top;
     for (let i = 0; i < last; i++) {
-      const here = t[i]!;
       const below = t[i + 1]!;
-      let flow = -tap;
-      if (f.chargeLevel <= i) flow += charge;
-      if (f.returnLevel > i) flow -= heating;
-      const down = (flow > 0 ? flow * here : flow * below) + conduction * (here - below);
-      out[i] = (above - down) * perLayer - loss[i]! * (here - room) * perLayerHeat;
-      above = down;
+      const flow = down[i]!;
+      const carried = flow * (flow > 0 ? here : below) + conduction * (here - below);
+      out[i] = (above - carried) * perLayer - lossPerS[i]! * (here - room);
+      above = carried;
+      here = below;
     }
-    const bottom = t[last]!;
     const tapReturn = top - f.effectiveness * (top - f.mainsC);
-    const net = above - charge * bottom + tap * tapReturn;
-    out[last] = (net - (loss[last]! * (bottom - room)) / CP) / this.bottomKg;
-    out[f.chargeLevel]! += (charge * f.chargeC) / (f.chargeLevel === last ? this.bottomKg : this.layerKg);
-    out[f.returnLevel]! += (heating * f.returnC) / (f.returnLevel === last ? this.bottomKg : this.layerKg);
+    const perBottom = 1 / this.bottomKg;
+    const net = above - charge * here + f.tapKgPerS * tapReturn;
+    out[last] = net * perBottom - lossPerS[last]! * this.layerKg * perBottom * (here - room);
+    if (charge > 0)
+      out[f.chargeLevel]! += charge * f.chargeC * (f.chargeLevel === last ? perBottom : perLayer);
+    if (f.heatingKgPerS > 0) {
+      out[f.returnLevel]! += f.heatingKgPerS * f.returnC * (f.returnLevel === last ? perBottom : perLayer);
+    }
   }
 
   /** First stage: rates at the present temperatures and the predicted temperatures after `dtS`. */
   predict(dtS: number): void {
+    this.settleFlows();
     this.rates(this.t, this.rate);
     for (let i = 0; i < this.count; i++) this.predicted[i] = this.t[i]! + dtS * this.rate[i]!;
     const last = this.count - 1;

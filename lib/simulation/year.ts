@@ -5,11 +5,10 @@
  */
 import { HouseNetwork } from '@/lib/physics/house-network';
 import { floorSurfaceCoefficient } from '@/lib/physics/floor';
-import { radiatorHeat } from '@/lib/physics/radiator';
 import { WATER_SPECIFIC_HEAT_J_PER_KG_K as CP } from '@/lib/physics/water';
 import { HOURS_PER_YEAR, SECONDS_PER_HOUR } from '@/lib/units/constants';
 import { ArrayLoop } from './array-loop';
-import type { Plan } from './plan';
+import { EXCESS_STEP_K, EXCESS_STEPS, type Plan } from './plan';
 import { StoreLayers } from './store-layers';
 import { Tally } from './tally';
 
@@ -74,7 +73,6 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
   const floorShareUp = 1 - plan.floorDownward;
   const loopWPerK = loopKgPerS * CP;
   const hasFloor = floorWPerK > 0;
-  const hasRadiators = plan.radiatorRatedW > 0;
   const flowKgPerS = plan.array.flowKgPerS;
   const areaM2 = plan.array.areaM2;
   const storeInside = plan.storeInside;
@@ -112,17 +110,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
     const heatingAllowed = outdoorC < roomSetC;
 
     const setC = columns.supplySetC[h]!;
-    let radiatorWPerK = 0;
-    if (hasRadiators && heatingAllowed && setC > network.airC + 0.5) {
-      const full = radiatorHeat(
-        plan.radiatorRatedW,
-        plan.radiatorExponent,
-        setC,
-        plan.radiatorKgPerS * CP,
-        network.airC,
-      );
-      radiatorWPerK = full / (setC - network.airC);
-    }
+    const radiatorWPerK = radiatorConductance(plan.radiatorWPerK, setC - network.airC);
 
     const tapKgPerS = columns.tapKgPerS[h]!;
     const mainsC = columns.mainsC[h]!;
@@ -163,6 +151,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
             supplyC = store.topC + lift;
             floorW = hasFloor ? Math.max(0, floorWPerK * (supplyC - network.slabC)) : 0;
             radiatorW = Math.max(0, radiatorWPerK * (supplyC - network.airC));
+            network.airRise(RADIATOR_TO_AIR * radiatorW, (1 - RADIATOR_TO_AIR) * radiatorW, floorW);
             fullW = floorW / floorShareUp + radiatorW;
             returnC = supplyC - fullW / loopWPerK;
           }
@@ -270,25 +259,15 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
       const backupW = Math.min(Math.max(0, ratedW - tapBackupW), Math.max(0, demandW - storeW));
       const givenW = storeW + backupW;
       storeLossW = lossJ / stepS;
-      const insideW = storeInside ? storeLossW : 0;
       let downwardW = 0;
-      if (plan.ideal) {
-        network.solve(outdoorC, outdoorC, gainToAir + insideW + givenW, gainToSurface, gainToMass, 0);
-      } else if (givenW > 0) {
-        const scale = demandW > 0 ? (duty * givenW) / demandW : 0;
-        const upW = scale * floorW;
-        const radW = scale * radiatorW;
-        downwardW = givenW - upW - radW;
-        network.solve(
-          outdoorC,
-          outdoorC,
-          gainToAir + insideW + RADIATOR_TO_AIR * radW,
-          gainToSurface + (1 - RADIATOR_TO_AIR) * radW,
-          gainToMass,
-          upW,
-        );
-      } else if (storeInside) {
-        network.solve(outdoorC, outdoorC, gainToAir + insideW, gainToSurface, gainToMass, 0);
+      if (storeInside) {
+        // the free response was worked with the store's loss of the step before
+        network.solve(outdoorC, outdoorC, gainToAir + storeLossW, gainToSurface, gainToMass, 0);
+      }
+      if (givenW > 0 && demandW > 0) {
+        const share = givenW / demandW;
+        network.add(plan.ideal ? givenW : share * duty);
+        if (!plan.ideal) downwardW = givenW - share * duty * (floorW + radiatorW);
       }
       network.advance();
       const lacking = heatingAllowed ? roomSetC - HALF_BAND_K - 1e-6 - network.airC : 0;
@@ -315,4 +294,12 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
   state.subSteps = subSteps;
   tally.end(state);
   return 'done';
+}
+
+/** Reads the table of radiators [W/K] at an excess of the supply over the room [K]. */
+function radiatorConductance(table: Float64Array, excessK: number): number {
+  const position = Math.min(EXCESS_STEPS, Math.max(0, excessK / EXCESS_STEP_K));
+  const step = Math.floor(position);
+  const share = position - step;
+  return table[step]! * (1 - share) + table[step + 1]! * share;
 }
