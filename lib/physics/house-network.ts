@@ -68,6 +68,13 @@ export class HouseNetwork {
   private m11 = 0.5;
   private m12 = 0.5;
   private m22 = 0.5;
+  private massToSurface = 0.5;
+  private slabToSurface = 0.5;
+  private perAir = 0.5;
+  private shared = 0.5;
+  private toMass = 0.5;
+  private toSlab = 0.5;
+  private toAir = 0.5;
   private massRise = 0.5;
   private slabRise = 0.5;
   private surfaceRise = 0.5;
@@ -115,6 +122,9 @@ export class HouseNetwork {
     this.airShare = this.hIs / (ventilationWPerK + this.hIs);
     this.h1 = this.airShare * ventilationWPerK;
     this.surfaceSum = this.h1 + this.hW + this.hMs + filmWPerK;
+    this.massToSurface = this.hMs / this.surfaceSum;
+    this.slabToSurface = filmWPerK / this.surfaceSum;
+    this.perAir = 1 / (ventilationWPerK + this.hIs);
     this.massTerm = (2 * this.massCapacityJPerK) / stepS;
     this.slabTerm = filmWPerK > 0 ? (2 * this.slabCapacityJPerK) / stepS : 1;
     const a11 = this.massTerm + this.hMs - (this.hMs * this.hMs) / this.surfaceSum + this.hEm;
@@ -127,33 +137,32 @@ export class HouseNetwork {
   }
 
   /**
-   * Mean nodes of the coming step for the given heat flows; leaves the state alone.
+   * Fixes outdoor air and the heat flows that do not come from the emitters, for the steps until the next call.
    * @param outdoorC θe [°C]
    * @param airSupplyC θsup [°C]
    * @param toAirW heat into the air node [W]
    * @param toSurfaceW heat into the surface node [W]
    * @param toMassW heat into the mass node [W]
-   * @param toSlabW heat into the slab [W]
    */
-  solve(
-    outdoorC: number,
-    airSupplyC: number,
-    toAirW: number,
-    toSurfaceW: number,
-    toMassW: number,
-    toSlabW: number,
-  ): void {
-    const drive = this.h1 * airSupplyC + this.hW * outdoorC + this.airShare * toAirW + toSurfaceW;
-    const shared = drive / this.surfaceSum;
-    const right1 = this.massTerm * this.massC + this.hMs * shared + this.hEm * outdoorC + toMassW;
-    const right2 = this.slabTerm * this.slabC + this.hFilm * shared + toSlabW;
+  drive(outdoorC: number, airSupplyC: number, toAirW: number, toSurfaceW: number, toMassW: number): void {
+    const heat = this.h1 * airSupplyC + this.hW * outdoorC + this.airShare * toAirW + toSurfaceW;
+    this.shared = heat / this.surfaceSum;
+    this.toMass = this.hMs * this.shared + this.hEm * outdoorC + toMassW;
+    this.toSlab = this.hFilm * this.shared;
+    this.toAir = this.hVe * airSupplyC + toAirW;
+  }
+
+  /** Mean nodes of the coming step under what `drive` has fixed; leaves the state alone. */
+  solve(): void {
+    const right1 = this.massTerm * this.massC + this.toMass;
+    const right2 = this.slabTerm * this.slabC + this.toSlab;
     const mass = this.m11 * right1 + this.m12 * right2;
     const slab = this.m12 * right1 + this.m22 * right2;
-    const surface = shared + (this.hMs * mass + this.hFilm * slab) / this.surfaceSum;
+    const surface = this.shared + this.massToSurface * mass + this.slabToSurface * slab;
     this.massMeanC = mass;
     this.slabMeanC = slab;
     this.surfaceC = surface;
-    this.airC = (this.hVe * airSupplyC + this.hIs * surface + toAirW) / (this.hVe + this.hIs);
+    this.airC = (this.toAir + this.hIs * surface) * this.perAir;
   }
 
   /**
@@ -169,8 +178,8 @@ export class HouseNetwork {
     const right2 = this.hFilm * shared + toSlabW;
     const mass = this.m11 * right1 + this.m12 * right2;
     const slab = this.m12 * right1 + this.m22 * right2;
-    const surface = shared + (this.hMs * mass + this.hFilm * slab) / this.surfaceSum;
-    const air = (this.hIs * surface + toAirW) / (this.hVe + this.hIs);
+    const surface = shared + this.massToSurface * mass + this.slabToSurface * slab;
+    const air = (this.hIs * surface + toAirW) * this.perAir;
     this.massRise = mass;
     this.slabRise = slab;
     this.surfaceRise = surface;
@@ -238,9 +247,10 @@ export function hourlyNeed(
     const toAir = 0.5 * internalW;
     const toSurface = network.gainToSurface * shared;
     const toMass = network.gainToMass * shared;
-    network.solve(outdoorC, outdoorC, toAir, toSurface, toMass, 0);
+    network.drive(outdoorC, outdoorC, toAir, toSurface, toMass);
+    network.solve();
     const need = Math.min(maximumW, Math.max(0, (setC - network.airC) / risePerW));
-    if (need > 0) network.solve(outdoorC, outdoorC, toAir + need, toSurface, toMass, 0);
+    if (need > 0) network.add(need);
     network.advance();
     needW[h] = need;
     airC[h] = network.airC;

@@ -1,4 +1,3 @@
-import type { HouseNetwork } from '@/lib/physics/house-network';
 import { HOURS_PER_YEAR, KWH_PER_J, MONTH_START_HOUR, SECONDS_PER_HOUR } from '@/lib/units/constants';
 import type { ArrayLoop } from './array-loop';
 import type { Plan } from './plan';
@@ -25,6 +24,28 @@ export const MONTH_FIELDS = [
 ] as const;
 export type MonthField = (typeof MONTH_FIELDS)[number];
 const WIDTH = MONTH_FIELDS.length;
+
+const MONTH_OF_HOUR = new Uint8Array(HOURS_PER_YEAR);
+for (let month = 0; month < 12; month++) {
+  MONTH_OF_HOUR.fill(month, MONTH_START_HOUR[month]!, MONTH_START_HOUR[month + 1]!);
+}
+
+/** Places in `Tally.hour`. */
+export const HOUR = {
+  SOLAR_HEATING: 0,
+  SOLAR_TAP: 1,
+  BACKUP_HEATING: 2,
+  BACKUP_TAP: 3,
+  TAP_LOAD: 4,
+  UNMET: 5,
+  DOWNWARD: 6,
+  STORE_LOSS: 7,
+  VENTILATION: 8,
+  TRANSMISSION: 9,
+  WINDOW_RELOSS: 10,
+  SUPPLY: 11,
+  RETURN: 12,
+} as const;
 
 /** Allocates the hourly columns of a year. */
 export function createColumns(layers: number): HourColumns {
@@ -87,14 +108,8 @@ export class Tally {
   private hourPipeJ = 0;
   private pumpS = 0;
   private unusedJ = 0;
-  private heatingJ = 0;
-  private hourTapJ = 0;
-  private solarHeatingJ = 0;
-  private solarTapJ = 0;
-  private backupHeatingJ = 0;
-  private backupTapJ = 0;
-  private unmetJ = 0;
-  private hourStoreLossJ = 0;
+  /** mean powers [W] and loop temperatures [°C] of the hour that is being worked, by `HOUR` */
+  readonly hour = new Float64Array(13);
 
   constructor(layers: number) {
     this.columns = createColumns(layers);
@@ -159,102 +174,66 @@ export class Tally {
     if (power > 0) this.unusedJ += areaM2 * power * dtS;
   }
 
-  /** Books one outer step of house, taps and backup [W over `stepS`]. */
-  bookStep(
-    network: HouseNetwork,
-    outdoorC: number,
-    relossW: number,
-    solarHeatingW: number,
-    solarTapW: number,
-    backupHeatingW: number,
-    backupTapW: number,
-    tapLoadW: number,
-    unmetW: number,
-    downwardW: number,
-    storeLossW: number,
-    stepS: number,
-  ): void {
-    this.solarHeatingJ += solarHeatingW * stepS;
-    this.solarTapJ += solarTapW * stepS;
-    this.backupHeatingJ += backupHeatingW * stepS;
-    this.backupTapJ += backupTapW * stepS;
-    this.heatingJ += (solarHeatingW + backupHeatingW) * stepS;
-    this.hourTapJ += tapLoadW * stepS;
-    this.unmetJ += unmetW * stepS;
-    this.hourStoreLossJ += storeLossW * stepS;
-    this.tapJ += (solarTapW + backupTapW) * stepS;
-    this.ventilationJ += network.hVe * (network.airC - outdoorC) * stepS;
-    this.transmissionJ +=
-      (network.hW * (network.surfaceC - outdoorC) + network.hEm * (network.massMeanC - outdoorC)) * stepS;
-    this.windowRelossJ += relossW * stepS;
-    this.downwardJ += downwardW * stepS;
-  }
-
-  /** Writes the hour's columns and adds its sums to month and year. */
-  closeHour(
-    h: number,
-    state: YearState,
-    plan: Plan,
-    supplySum: number,
-    returnSum: number,
-    dutySum: number,
-  ): void {
-    const c = this.columns;
-    const perHour = 1 / SECONDS_PER_HOUR;
+  /** Writes the columns of the hour whose mean powers stand in `hour`, and adds its sums to month and year. */
+  closeHour(h: number, state: YearState, plan: Plan): void {
+    const { columns: c, hour } = this;
+    const solarHeatingW = hour[HOUR.SOLAR_HEATING]!;
+    const solarTapW = hour[HOUR.SOLAR_TAP]!;
+    const backupHeatingW = hour[HOUR.BACKUP_HEATING]!;
+    const backupTapW = hour[HOUR.BACKUP_TAP]!;
+    const unmetW = hour[HOUR.UNMET]!;
     const outdoorC = plan.columns.outdoorC[h]!;
+    const planeWm2 = plan.columns.planeWm2[h]!;
     c.outdoorC[h] = outdoorC;
-    c.planeWm2[h] = plan.columns.planeWm2[h]!;
-    c.arrayW[h] = this.givenJ * perHour;
-    c.pumpShare[h] = this.pumpS * perHour;
+    c.planeWm2[h] = planeWm2;
+    c.arrayW[h] = this.givenJ / SECONDS_PER_HOUR;
+    c.pumpShare[h] = this.pumpS / SECONDS_PER_HOUR;
     c.arrayC[h] = state.mounted ? state.loop.arrayC : outdoorC;
-    c.solarHeatingW[h] = this.solarHeatingJ * perHour;
-    c.solarTapW[h] = this.solarTapJ * perHour;
-    c.backupHeatingW[h] = this.backupHeatingJ * perHour;
-    c.backupTapW[h] = this.backupTapJ * perHour;
-    c.unmetW[h] = this.unmetJ * perHour;
+    c.solarHeatingW[h] = solarHeatingW;
+    c.solarTapW[h] = solarTapW;
+    c.backupHeatingW[h] = backupHeatingW;
+    c.backupTapW[h] = backupTapW;
+    c.unmetW[h] = unmetW;
     c.storeTopC[h] = state.store.topC;
     c.storeBottomC[h] = state.store.bottomC;
     const layers = state.store.count;
     for (let i = 0; i < layers; i++) c.storeLayersC[i * HOURS_PER_YEAR + h] = state.store.t[i]!;
     c.roomC[h] = state.network.airC;
     c.floorSurfaceC[h] = plan.floorWPerK > 0 ? state.network.slabC : state.network.airC;
-    c.supplyC[h] = dutySum > 0 ? supplySum / dutySum : NaN;
-    c.returnC[h] = dutySum > 0 ? returnSum / dutySum : NaN;
+    c.supplyC[h] = hour[HOUR.SUPPLY]!;
+    c.returnC[h] = hour[HOUR.RETURN]!;
 
-    const planeJ = state.mounted ? plan.columns.planeWm2[h]! * plan.array.areaM2 * SECONDS_PER_HOUR : 0;
     const m = this.monthJ;
-    const row = monthOf(h) * WIDTH;
-    m[row]! += this.heatingJ;
-    m[row + 1]! += this.hourTapJ;
-    m[row + 2]! += this.solarHeatingJ;
-    m[row + 3]! += this.solarTapJ;
-    m[row + 4]! += this.backupHeatingJ;
-    m[row + 5]! += this.backupTapJ;
-    m[row + 6]! += this.unmetJ;
+    const row = MONTH_OF_HOUR[h]! * WIDTH;
+    m[row]! += (solarHeatingW + backupHeatingW) * SECONDS_PER_HOUR;
+    m[row + 1]! += hour[HOUR.TAP_LOAD]! * SECONDS_PER_HOUR;
+    m[row + 2]! += solarHeatingW * SECONDS_PER_HOUR;
+    m[row + 3]! += solarTapW * SECONDS_PER_HOUR;
+    m[row + 4]! += backupHeatingW * SECONDS_PER_HOUR;
+    m[row + 5]! += backupTapW * SECONDS_PER_HOUR;
+    m[row + 6]! += unmetW * SECONDS_PER_HOUR;
     m[row + 7]! += this.givenJ;
-    m[row + 8]! += planeJ;
-    m[row + 9]! += this.hourStoreLossJ;
+    m[row + 8]! += state.mounted ? planeWm2 * plan.array.areaM2 * SECONDS_PER_HOUR : 0;
+    m[row + 9]! += hour[HOUR.STORE_LOSS]! * SECONDS_PER_HOUR;
     m[row + 10]! += this.hourPipeJ;
     m[row + 11]! += this.unusedJ;
     m[row + 12]! += this.pumpS;
     m[row + 13]! += this.starts - this.hourStarts;
     m[row + 14]! += outdoorC * SECONDS_PER_HOUR;
 
-    this.backupJ += this.backupHeatingJ + this.backupTapJ;
-    this.storeLossJ += this.hourStoreLossJ;
+    this.backupJ += (backupHeatingW + backupTapW) * SECONDS_PER_HOUR;
+    this.tapJ += (solarTapW + backupTapW) * SECONDS_PER_HOUR;
+    this.storeLossJ += hour[HOUR.STORE_LOSS]! * SECONDS_PER_HOUR;
+    this.ventilationJ += hour[HOUR.VENTILATION]! * SECONDS_PER_HOUR;
+    this.transmissionJ += hour[HOUR.TRANSMISSION]! * SECONDS_PER_HOUR;
+    this.windowRelossJ += hour[HOUR.WINDOW_RELOSS]! * SECONDS_PER_HOUR;
+    this.downwardJ += hour[HOUR.DOWNWARD]! * SECONDS_PER_HOUR;
     this.pipeLossJ += this.hourPipeJ;
     this.windowSunJ += plan.columns.windowSunW[h]! * SECONDS_PER_HOUR;
     this.internalJ += plan.internalW * SECONDS_PER_HOUR;
     this.hourStarts = this.starts;
-    this.givenJ = this.hourPipeJ = this.pumpS = this.unusedJ = this.heatingJ = this.hourTapJ = 0;
-    this.solarHeatingJ = this.solarTapJ = this.backupHeatingJ = this.backupTapJ = 0;
-    this.unmetJ = this.hourStoreLossJ = 0;
+    this.givenJ = this.hourPipeJ = this.pumpS = this.unusedJ = 0;
   }
-}
-
-const MONTH_OF_HOUR = new Uint8Array(HOURS_PER_YEAR);
-for (let month = 0; month < 12; month++) {
-  MONTH_OF_HOUR.fill(month, MONTH_START_HOUR[month]!, MONTH_START_HOUR[month + 1]!);
 }
 
 /** Month of an hour of the year, January = 0. */

@@ -10,7 +10,7 @@ import { HOURS_PER_YEAR, SECONDS_PER_HOUR } from '@/lib/units/constants';
 import { ArrayLoop } from './array-loop';
 import { EXCESS_STEP_K, EXCESS_STEPS, type Plan } from './plan';
 import { StoreLayers } from './store-layers';
-import { Tally } from './tally';
+import { HOUR, type Tally } from './tally';
 
 /** Switches of the pump within one step after which its state is held to the end of the step. */
 const SWITCH_CAP = 60;
@@ -24,6 +24,22 @@ const RADIATOR_TO_AIR = 0.7;
 /** Surplus of the store over the return that makes its draw worth while [K]. */
 const RETURN_MARGIN_K = 1;
 const UNLOCK_K = 2;
+
+const {
+  SOLAR_HEATING,
+  SOLAR_TAP,
+  BACKUP_HEATING,
+  BACKUP_TAP,
+  TAP_LOAD,
+  UNMET,
+  DOWNWARD,
+  STORE_LOSS,
+  VENTILATION,
+  TRANSMISSION,
+  WINDOW_RELOSS,
+  SUPPLY,
+  RETURN,
+} = HOUR;
 
 export type YearStatus = 'done' | 'too stiff' | 'not finite';
 
@@ -108,6 +124,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
     const gainToMass = network.gainToMass * gains;
     const gainToAir = 0.5 * internalW;
     const heatingAllowed = outdoorC < roomSetC;
+    network.drive(outdoorC, outdoorC, gainToAir, gainToSurface, gainToMass);
 
     const setC = columns.supplySetC[h]!;
     const radiatorWPerK = radiatorConductance(plan.radiatorWPerK, setC - network.airC);
@@ -119,10 +136,20 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
     let supplySum = 0;
     let returnSum = 0;
     let dutySum = 0;
+    let storeSum = 0;
+    let tapStoreSum = 0;
+    let backupSum = 0;
+    let tapBackupSum = 0;
+    let unmetSum = 0;
+    let downwardSum = 0;
+    let lossSum = 0;
+    let airSum = 0;
+    let surfaceSum = 0;
+    let massSum = 0;
 
     for (let step = 0; step < stepsPerHour; step++) {
-      const toAir = storeInside ? gainToAir + storeLossW : gainToAir;
-      network.solve(outdoorC, outdoorC, toAir, gainToSurface, gainToMass, 0);
+      if (storeInside) network.drive(outdoorC, outdoorC, gainToAir + storeLossW, gainToSurface, gainToMass);
+      network.solve();
 
       // thermostat: duty of the emitters at full flow and set supply, solved for the air of this step
       let duty = 0;
@@ -262,7 +289,8 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
       let downwardW = 0;
       if (storeInside) {
         // the free response was worked with the store's loss of the step before
-        network.solve(outdoorC, outdoorC, gainToAir + storeLossW, gainToSurface, gainToMass, 0);
+        network.drive(outdoorC, outdoorC, gainToAir + storeLossW, gainToSurface, gainToMass);
+        network.solve();
       }
       if (givenW > 0 && demandW > 0) {
         const share = givenW / demandW;
@@ -272,22 +300,34 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
       network.advance();
       const lacking = heatingAllowed ? roomSetC - HALF_BAND_K - 1e-6 - network.airC : 0;
       const unmetW = tapShortW + (lacking > 0 ? lacking * plan.staticLossWPerK : 0);
-      tally.bookStep(
-        network,
-        outdoorC,
-        gains * network.gainLost,
-        storeW,
-        tapStoreW,
-        backupW,
-        tapBackupW,
-        tapLoadW,
-        unmetW,
-        downwardW,
-        storeLossW,
-        stepS,
-      );
+      storeSum += storeW;
+      tapStoreSum += tapStoreW;
+      backupSum += backupW;
+      tapBackupSum += tapBackupW;
+      unmetSum += unmetW;
+      downwardSum += downwardW;
+      lossSum += storeLossW;
+      airSum += network.airC;
+      surfaceSum += network.surfaceC;
+      massSum += network.massMeanC;
     }
-    tally.closeHour(h, state, plan, supplySum, returnSum, dutySum);
+    const mean = 1 / stepsPerHour;
+    const hour = tally.hour;
+    hour[SOLAR_HEATING] = storeSum * mean;
+    hour[SOLAR_TAP] = tapStoreSum * mean;
+    hour[BACKUP_HEATING] = backupSum * mean;
+    hour[BACKUP_TAP] = tapBackupSum * mean;
+    hour[TAP_LOAD] = tapLoadW;
+    hour[UNMET] = unmetSum * mean;
+    hour[DOWNWARD] = downwardSum * mean;
+    hour[STORE_LOSS] = lossSum * mean;
+    hour[VENTILATION] = network.hVe * (airSum * mean - outdoorC);
+    hour[TRANSMISSION] =
+      network.hW * (surfaceSum * mean - outdoorC) + network.hEm * (massSum * mean - outdoorC);
+    hour[WINDOW_RELOSS] = gains * network.gainLost;
+    hour[SUPPLY] = dutySum > 0 ? supplySum / dutySum : NaN;
+    hour[RETURN] = dutySum > 0 ? returnSum / dutySum : NaN;
+    tally.closeHour(h, state, plan);
     if (subSteps > plan.subStepCap) return 'too stiff';
     if (!(network.airC > -200 && store.topC > -200 && store.topC < 1000)) return 'not finite';
   }

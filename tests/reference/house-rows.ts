@@ -22,9 +22,10 @@ function steady(outdoorC: number, airC: number): number {
   const risePerW = network.airRise(1, 0, 0);
   let need = 0;
   for (let h = 0; h < 20_000; h++) {
-    network.solve(outdoorC, outdoorC, 0, 0, 0, 0);
+    network.drive(outdoorC, outdoorC, 0, 0, 0);
+    network.solve();
     need = (airC - network.airC) / risePerW;
-    network.solve(outdoorC, outdoorC, need, 0, 0, 0);
+    network.add(need);
     network.advance();
   }
   return need;
