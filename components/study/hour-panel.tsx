@@ -1,6 +1,6 @@
 import type { StudyAnswer } from '@/lib/study/study-question';
 import { NO_VALUE, formatFixed, withUnit } from '@/lib/units/display';
-import { celsius, hourName, hourSentence, kilowatts } from './hour-words';
+import { celsius, hourName, hourSentence, power } from './hour-words';
 
 interface Sounding {
   name: string;
@@ -19,7 +19,7 @@ function soundings(answer: StudyAnswer, hour: number): Sounding[] {
     { name: 'sun on the array’s plane', value: withUnit(formatFixed(at(columns.planeWm2)), 'W/m²') },
     {
       name: 'array into the store',
-      value: pump > 0 ? kilowatts(at(columns.arrayW)) : 'empty',
+      value: pump > 0 ? power(at(columns.arrayW)) : 'empty',
       note:
         pump > 0 ? `pump ${formatFixed(pump * 60)} of 60 minutes` : `plate ${celsius(at(columns.arrayC), 0)}`,
     },
@@ -34,7 +34,7 @@ function soundings(answer: StudyAnswer, hour: number): Sounding[] {
     { name: 'floor surface', value: celsius(at(columns.floorSurfaceC)) },
     {
       name: 'backup',
-      value: kilowatts(at(columns.backupHeatingW) + at(columns.backupTapW)),
+      value: power(at(columns.backupHeatingW) + at(columns.backupTapW)),
     },
   ];
 }

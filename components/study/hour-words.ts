@@ -8,9 +8,12 @@ import { formatFixed, formatSignificant, withUnit } from '@/lib/units/display';
 
 const SMALLEST_W = 20;
 
-/** "2.4 kW". */
-export function kilowatts(watts: number): string {
-  return withUnit(formatSignificant(watts / W_PER_KW, 2), 'kW');
+/** "2.4 kW", "0.3 kW", and watts where that would be nothing: "31 W". */
+export function power(watts: number): string {
+  if (watts < 10) return withUnit('0', 'kW');
+  if (watts < 95) return withUnit(formatSignificant(watts, 2), 'W');
+  const kilowatts = watts / W_PER_KW;
+  return withUnit(kilowatts < 1 ? formatFixed(kilowatts, 1) : formatSignificant(kilowatts, 2), 'kW');
 }
 
 /** "36.4 °C". */
@@ -53,7 +56,7 @@ export function spokenHour(answer: StudyAnswer, hour: number): string {
   const words = [
     hourName(hour).replace(',', ''),
     SPOKEN_CARRIERS[carrierAt(answer, hour)],
-    heatW > SMALLEST_W ? kilowatts(heatW) : '',
+    heatW > SMALLEST_W ? power(heatW) : '',
     `store ${celsius(columns.storeTopC[hour]!, 0)}`,
     `room ${celsius(columns.roomC[hour]!)}`,
     ...tooHotParts(answer, hour).map((part) => `empty ${part} above its limit`),
@@ -69,7 +72,7 @@ export function hourSentence(answer: StudyAnswer, hour: number): string {
   const carrier = carrierAt(answer, hour);
   const sentences = [carrierSentence(carrier, sunW, backupW)];
   if (columns.arrayW[hour]! > SMALLEST_W) {
-    sentences.push(`The array puts ${kilowatts(columns.arrayW[hour]!)} into the store.`);
+    sentences.push(`The array puts ${power(columns.arrayW[hour]!)} into the store.`);
   }
   const parts = tooHotParts(answer, hour);
   if (parts.length > 0)
@@ -82,15 +85,15 @@ function carrierSentence(carrier: Carrier, sunW: number, backupW: number): strin
     case 'nothing needed':
       return 'The house needs no heat.';
     case 'sun, straight in':
-      return `The sun carries the house with ${kilowatts(sunW)}. No backup.`;
+      return `The sun carries the house with ${power(sunW)}. No backup.`;
     case 'sun from the store':
-      return `The store carries the house with ${kilowatts(sunW)}. No backup.`;
+      return `The store carries the house with ${power(sunW)}. No backup.`;
     case 'sun and backup':
-      return `Sun with ${kilowatts(sunW)} and backup with ${kilowatts(backupW)} share the house.`;
+      return `Sun with ${power(sunW)} and backup with ${power(backupW)} share the house.`;
     case 'store and backup':
-      return `The store with ${kilowatts(sunW)} and backup with ${kilowatts(backupW)} share the house.`;
+      return `The store with ${power(sunW)} and backup with ${power(backupW)} share the house.`;
     case 'backup':
-      return `The backup carries the house with ${kilowatts(backupW)}.`;
+      return `The backup carries the house with ${power(backupW)}.`;
     case 'not met':
       return 'The house gets less heat than it asks for.';
   }

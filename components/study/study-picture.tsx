@@ -18,14 +18,22 @@ import { spokenHour } from './hour-words';
 import { MonthFigure } from './month-figures';
 import { YearTable } from './year-table';
 
-/** 26 February, 13:00: a bright hour of late winter, when sun, store and backup all have their part. */
-const FIRST_CURSOR_HOUR = 56 * HOURS_PER_DAY + 13;
+/** 1 February to 15 March: late winter, when sun, store and backup all have their part. */
+const TELLING_DAYS = [31, 74] as const;
 const ROW_PX = 9;
 
 const READINGS: readonly { value: ReadingId; label: string }[] = [
   { value: 'carrier', label: 'Who carried the house' },
   ...BAND_READINGS.map(({ id, label }) => ({ value: id, label })),
 ];
+
+/** Where the cursor stands at first: the hour of late winter in which the array gives most. */
+function tellingHour({ result }: StudyAnswer): number {
+  const [from, to] = TELLING_DAYS.map((day) => day * HOURS_PER_DAY) as [number, number];
+  const outputs = result.columns.arrayW.subarray(from, to);
+  const best = outputs.reduce((most, watts, hour) => (watts > outputs[most]! ? hour : most), 12);
+  return from + best;
+}
 
 interface StudyPictureProps {
   feed: AnswerFeed;
@@ -50,7 +58,9 @@ export function StudyPicture({
   months: monthsSection,
 }: StudyPictureProps) {
   const [reading, setReading] = useState<ReadingId>('carrier');
-  const [hour, setHour] = useState(FIRST_CURSOR_HOUR);
+  const [chosenHour, setHour] = useState<number>();
+  if (chosenHour === undefined && answer) setHour(tellingHour(answer));
+  const hour = chosenHour ?? TELLING_DAYS[0] * HOURS_PER_DAY + 12;
   const [moved, setMoved] = useState('');
   const [asTable, setAsTable] = useState(false);
   const months = useMemo(
