@@ -50,6 +50,13 @@ export class ArrayLoop {
   mustRunS = 0.5;
   starts = 0;
 
+  /** length of the sub-step [s], bottom layer of the store [°C]: set before each call that reads them */
+  dtS = 0.5;
+  bottomC = 0.5;
+  /** time until the controller switches [s], water coming back to the store [°C]: answers of the last call */
+  switchS = 0.5;
+  chargeC = 0.5;
+
   /** of the last sub-step: heat lost by array, by pipes, given to the store [J] */
   arrayLossJ = 0.5;
   pipeLossJ = 0.5;
@@ -103,23 +110,26 @@ export class ArrayLoop {
     this.linearise(0, 0, this.input.dryCapacityJPerK);
   }
 
-  /**
-   * Time until the pump may start [s]: plate above bottom + start difference and below the inhibit temperature.
-   * @param bottomC bottom layer of the store [°C]
-   */
-  timeToStart(bottomC: number): number {
-    const start = bottomC + this.input.startK;
+  /** Time until the pump may start, into `switchS`: plate above bottom + start difference and below the inhibit temperature. */
+  findStart(): void {
+    const start = this.bottomC + this.input.startK;
     const inhibit = this.input.inhibitC;
     const plate = this.arrayC;
-    if (start >= inhibit) return Infinity;
-    if (plate > inhibit + 1e-9) return this.root < inhibit ? this.timeTo(inhibit) : Infinity;
-    if (plate >= start - 1e-9) return plate < inhibit || this.root < plate ? 0 : Infinity;
-    return this.root > start ? this.timeTo(start) : Infinity;
+    let time = Infinity;
+    if (start < inhibit) {
+      if (plate > inhibit + 1e-9) {
+        if (this.root < inhibit) time = this.timeTo(inhibit);
+      } else if (plate >= start - 1e-9) {
+        if (plate < inhibit || this.root < plate) time = 0;
+      } else if (this.root > start) time = this.timeTo(start);
+    }
+    this.switchS = time;
   }
 
   /** The empty plate over `dtS`; the pipe wall relaxes to outdoor air. */
-  advanceEmpty(dtS: number): void {
+  advanceEmpty(): void {
     const { areaM2, pipeCapacityJPerK, pipeLossWPerK } = this.input;
+    const dtS = this.dtS;
     const x = this.decay * dtS;
     const e = Math.exp(-x);
     const gap = this.arrayC - this.root;
@@ -137,57 +147,57 @@ export class ArrayLoop {
   }
 
   /** Water temperature at the array's inlet for water of `bottomC` leaving the store [°C]. */
-  inletC(bottomC: number): number {
-    return this.outdoorC + (bottomC - this.outdoorC) * this.pipeKept;
+  private inletC(): number {
+    return this.outdoorC + (this.bottomC - this.outdoorC) * this.pipeKept;
   }
 
   /** Prepares a running sub-step with inlet water from `bottomC`. */
-  prepareRunning(bottomC: number): void {
-    this.linearise(2 * this.flowWPerK, this.inletC(bottomC), this.fullJPerK);
+  prepareRunning(): void {
+    this.linearise(2 * this.flowWPerK, this.inletC(), this.fullJPerK);
   }
 
-  /** Time until outlet − inlet falls below the stop difference [s], not before the minimum run is over. */
-  timeToStop(bottomC: number): number {
-    const stop = this.inletC(bottomC) + 0.5 * this.input.stopK;
+  /** Time until outlet − inlet falls below the stop difference, not before the minimum run is over; into `switchS`. */
+  findStop(): void {
+    const stop = this.inletC() + 0.5 * this.input.stopK;
     let time = Infinity;
     if (this.arrayC <= stop + 1e-9) time = 0;
     else if (this.root < stop) time = this.timeTo(stop);
-    return Math.max(time, this.mustRunS);
+    this.switchS = Math.max(time, this.mustRunS);
   }
 
   /** Whether outlet − inlet is below the stop difference now and the minimum run is over. */
-  wantsStop(bottomC: number): boolean {
-    return this.mustRunS <= 1e-7 && this.arrayC <= this.inletC(bottomC) + 0.5 * this.input.stopK + 1e-9;
+  wantsStop(): boolean {
+    return this.mustRunS <= 1e-7 && this.arrayC <= this.inletC() + 0.5 * this.input.stopK + 1e-9;
   }
 
-  /** Mean temperature at which the water of a sub-step of `dtS` comes back to the store [°C], state untouched. */
-  chargeC(dtS: number, bottomC: number): number {
-    const x = this.decay * dtS;
+  /** Mean temperature at which the water of the sub-step comes back to the store, into `chargeC`; state untouched. */
+  findCharge(): void {
+    const x = this.decay * this.dtS;
     const gap = this.arrayC - this.root;
-    const meanGap = x > 1e-9 ? (gap * -Math.expm1(-x)) / x : gap;
-    const outletC = 2 * (this.root + meanGap) - this.inletC(bottomC);
-    return this.outdoorC + (outletC - this.outdoorC) * this.pipeKept;
+    const meanGap = x > 1e-9 ? (gap * (1 - Math.exp(-x))) / x : gap;
+    const outletC = 2 * (this.root + meanGap) - this.inletC();
+    this.chargeC = this.outdoorC + (outletC - this.outdoorC) * this.pipeKept;
   }
 
-  /** Moves the root for an inlet that is warmer by `riseK` at the store; exact for the linearised balance. */
-  shiftInlet(riseK: number): void {
+  /** Moves `bottomC` to the mean of the sub-step and the root with it; exact for the linearised balance. */
+  shiftBottom(meanBottomC: number): void {
     const flow = 2 * this.flowWPerK;
-    const capacityTimesDecay = this.decay * this.fullJPerK;
-    const step = (flow * riseK * this.pipeKept) / capacityTimesDecay;
+    const step = (flow * (meanBottomC - this.bottomC) * this.pipeKept) / (this.decay * this.fullJPerK);
     this.root += step;
     this.rootLossWm2 += this.slope * step;
+    this.bottomC = meanBottomC;
   }
 
-  /** The running array over `dtS` with mean bottom temperature `bottomC` already applied by `shiftInlet`. */
-  advanceRunning(dtS: number, bottomC: number, chargeC: number): void {
+  /** The running array over `dtS`, after `shiftBottom` and `findCharge`. */
+  advanceRunning(): void {
     const { areaM2 } = this.input;
+    const { dtS, bottomC, chargeC } = this;
     const x = this.decay * dtS;
     const e = Math.exp(-x);
     const gap = this.arrayC - this.root;
     const meanGap = x > 1e-9 ? (gap * (1 - e)) / x : gap;
-    const meanC = this.root + meanGap;
-    const inletC = this.inletC(bottomC);
-    const outletC = 2 * meanC - inletC;
+    const inletC = this.inletC();
+    const outletC = 2 * (this.root + meanGap) - inletC;
     this.arrayLossJ = areaM2 * (this.rootLossWm2 + this.slope * meanGap) * dtS;
     this.pipeLossJ = this.flowWPerK * (bottomC - inletC + (outletC - chargeC)) * dtS;
     this.givenJ = this.flowWPerK * (chargeC - bottomC) * dtS;

@@ -16,6 +16,8 @@ export class StoreFlows {
   /** charging flow [kg/s], enters at `chargeLevel` with `chargeC`, leaves from the bottom */
   chargeKgPerS = 0.0;
   chargeC = 0.5;
+  /** the same in the first stage, before the inlet of the array was known */
+  firstChargeC = 0.5;
   chargeLevel = 0;
   /** heating draw from the top [kg/s], comes back with `returnC` into `returnLevel` */
   heatingKgPerS = 0.0;
@@ -49,6 +51,8 @@ export class StoreLayers {
   private readonly conductionKgPerS: number;
   roomC: number;
   readonly flows = new StoreFlows();
+  /** length of the sub-step [s] */
+  dtS = 0.5;
 
   /** mean top and bottom temperature of the last sub-step [°C], with which its energies are booked */
   topMeanC = 0.5;
@@ -156,7 +160,8 @@ export class StoreLayers {
   }
 
   /** First stage: rates at the present temperatures and the predicted temperatures after `dtS`. */
-  predict(dtS: number): void {
+  predict(): void {
+    const dtS = this.dtS;
     this.settleFlows();
     this.rates(this.t, this.rate);
     for (let i = 0; i < this.count; i++) this.predicted[i] = this.t[i]! + dtS * this.rate[i]!;
@@ -166,14 +171,14 @@ export class StoreLayers {
   }
 
   /**
-   * Second stage. The charging water of the first stage came with `firstChargeC`; both stages are booked with
+   * Second stage. The charging water of the first stage came with `flows.firstChargeC`; both stages are booked with
    * the final `flows.chargeC`, so that the heat given is that of the array.
    */
-  correct(dtS: number, firstChargeC: number): void {
-    const f = this.flows;
+  correct(): void {
+    const { flows: f, dtS } = this;
     const last = this.count - 1;
     this.rates(this.predicted, this.rate2);
-    const shift = f.chargeKgPerS * (f.chargeC - firstChargeC);
+    const shift = f.chargeKgPerS * (f.chargeC - f.firstChargeC);
     if (shift !== 0) {
       this.rate[f.chargeLevel]! += shift / (f.chargeLevel === last ? this.bottomKg : this.layerKg);
     }

@@ -197,10 +197,12 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
       let lossJ = 0;
       while (rest > TIME_TOLERANCE_S) {
         const topC = store.topC;
+        const bottomC = store.bottomC;
+        loop.bottomC = bottomC;
         const held = switches >= SWITCH_CAP;
         if (loop.full) {
           const overLimit = topC > storeLimitC;
-          if (!held && (overLimit || loop.wantsStop(store.bottomC))) {
+          if (!held && (overLimit || loop.wantsStop())) {
             loop.drain(store);
             if (overLimit) state.locked = true;
             switches++;
@@ -226,45 +228,49 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
         flows.chargeKgPerS = loop.full ? flowKgPerS : 0;
         let dt = Math.min(rest, store.stepLimitS(theta));
 
-        const bottomC = store.bottomC;
         if (loop.full) {
-          loop.prepareRunning(bottomC);
-          if (!held) dt = Math.min(dt, loop.timeToStop(bottomC));
+          loop.prepareRunning();
+          if (!held) {
+            loop.findStop();
+            dt = Math.min(dt, loop.switchS);
+          }
         } else if (mounted) {
           loop.prepareEmpty();
           if (!state.locked && !held) {
-            const wait = loop.timeToStart(bottomC);
-            if (wait <= TIME_TOLERANCE_S) {
+            loop.findStart();
+            if (loop.switchS <= TIME_TOLERANCE_S) {
               loop.fill(store);
               tally.starts++;
               switches++;
               continue;
             }
-            dt = Math.min(dt, wait);
+            dt = Math.min(dt, loop.switchS);
           }
         }
         if (dt < TIME_TOLERANCE_S) dt = Math.min(rest, 1e-3);
 
+        store.dtS = dt;
+        loop.dtS = dt;
         flows.returnC = returnC;
         flows.returnLevel = heatingKgPerS > 0 ? store.levelFor(returnC) : 0;
         if (loop.full) {
-          const firstC = loop.chargeC(dt, bottomC);
-          flows.chargeC = firstC;
-          flows.chargeLevel = store.levelFor(firstC);
-          store.predict(dt);
-          loop.shiftInlet(store.bottomMeanC - bottomC);
-          const chargeC = loop.chargeC(dt, store.bottomMeanC);
-          flows.chargeC = chargeC;
-          store.correct(dt, firstC);
-          loop.advanceRunning(dt, store.bottomMeanC, chargeC);
+          loop.findCharge();
+          flows.chargeC = flows.firstChargeC = loop.chargeC;
+          flows.chargeLevel = store.levelFor(loop.chargeC);
+          store.predict();
+          loop.shiftBottom(store.bottomMeanC);
+          loop.findCharge();
+          flows.chargeC = loop.chargeC;
+          store.correct();
+          loop.advanceRunning();
           tally.book(loop, areaM2 * absorbedWm2 * dt, dt);
           if (bottomC < tally.coldestInletC) tally.coldestInletC = bottomC;
         } else {
           flows.chargeLevel = 0;
-          store.predict(dt);
-          store.correct(dt, flows.chargeC);
+          store.predict();
+          store.correct();
           if (mounted) {
-            loop.advanceEmpty(dt);
+            loop.advanceEmpty();
             tally.book(loop, areaM2 * absorbedWm2 * dt, 0);
             if (loop.arrayC > tally.plateMaxC) tally.plateMaxC = loop.arrayC;
             if (state.locked)
