@@ -18,9 +18,10 @@ const fractions = (points: readonly (readonly [x: number, y: number])[]) =>
 function leftAlone(store: StoreLayers, hours: number): { lostKwh: number } {
   const steps = 4 * hours;
   let lostJ = 0;
+  store.dtS = SECONDS_PER_HOUR / 4;
   for (let i = 0; i < steps; i++) {
-    store.predict((hours * SECONDS_PER_HOUR) / steps);
-    store.correct((hours * SECONDS_PER_HOUR) / steps, 0);
+    store.predict();
+    store.correct();
     lostJ += store.lossJ;
   }
   return { lostKwh: lostJ * KWH_PER_J };
@@ -35,9 +36,10 @@ function flushed(layers: number, turnovers: number): number {
   store.flows.heatingKgPerS = (turnovers * kg) / steps;
   store.flows.returnC = 0;
   store.flows.returnLevel = layers - 1;
+  store.dtS = 1;
   for (let i = 0; i < steps; i++) {
-    store.predict(1);
-    store.correct(1, 0);
+    store.predict();
+    store.correct();
   }
   return store.topC;
 }
