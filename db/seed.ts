@@ -1,4 +1,4 @@
-import { createHash, randomInt } from 'node:crypto';
+import { createHash } from 'node:crypto';
 import { pathToFileURL } from 'node:url';
 import { sql, type Kysely, type Transaction } from 'kysely';
 import { climates } from '@/data/climates/climates';
@@ -9,14 +9,10 @@ import { openDatabase } from './client';
 import { insertAccount } from './queries/accounts';
 import { insertProject } from './queries/projects';
 import { findClimateId, upsertClimate } from './queries/weather-years';
+import { readablePassword } from './readable-password';
 import type { Database } from './schema';
 
-const OWNER_EMAIL = 'owner@tepidarium.localhost';
-
-/** Letters and digits that cannot be taken for one another. */
-const ALPHABET = 'abcdefghjkmnpqrstuvwxyz23456789';
-const GROUPS = 4;
-const GROUP_LENGTH = 5;
+export const OWNER_EMAIL = 'owner@tepidarium.localhost';
 
 export interface Seeded {
   /** only when the owner was created just now with a random password: it is stored nowhere else */
@@ -66,12 +62,6 @@ async function seedOwner(db: Transaction<Database>): Promise<Seeded> {
   return chosen ? {} : { newOwner: { email: OWNER_EMAIL, password } };
 }
 
-function readablePassword(): string {
-  const letter = () => ALPHABET[randomInt(ALPHABET.length)]!;
-  const group = () => Array.from({ length: GROUP_LENGTH }, letter).join('');
-  return Array.from({ length: GROUPS }, group).join('-');
-}
-
 if (process.argv[1] && import.meta.url === pathToFileURL(process.argv[1]).href) {
   const url = process.env.DATABASE_URL;
   if (!url)
@@ -80,7 +70,7 @@ if (process.argv[1] && import.meta.url === pathToFileURL(process.argv[1]).href) 
   if (newOwner) {
     process.stdout.write(
       `Sign in as ${newOwner.email} with the password ${newOwner.password}\n` +
-        'This password is shown once and stored nowhere: write it down.\n',
+        'This password is shown once and stored nowhere: write it down. (npm run db -- password makes a new one.)\n',
     );
   }
 }

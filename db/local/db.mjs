@@ -2,6 +2,7 @@ import './node-version.mjs';
 import { clusterStatus, holdCluster, stopCluster } from './cluster.mjs';
 import { ensureDatabase } from './databases.mjs';
 import { Refusal, say } from './say.mjs';
+import { newPassword } from './schema.mjs';
 
 const DATABASE = 'tepidarium';
 
@@ -23,6 +24,15 @@ const COMMANDS = {
     say(
       `PostgreSQL answers on 127.0.0.1:${status.port}; data in ${status.folder}; used by ${status.holders.length} process(es).`,
     );
+  },
+  /** Gives the owner a new password, for whoever lost the one that the first start printed. */
+  async password() {
+    const cluster = process.env.DATABASE_URL ? undefined : await holdCluster({ install: false });
+    try {
+      await newPassword(process.env.DATABASE_URL ?? cluster.url(DATABASE));
+    } finally {
+      await cluster?.release();
+    }
   },
   async url() {
     const status = await clusterStatus();

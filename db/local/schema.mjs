@@ -20,6 +20,11 @@ export async function seed(url, signal, ownerPassword) {
   await runScript('db/seed.ts', 'Seeding the database', url, signal, chosen);
 }
 
+/** Gives the owner a new password and says it. @param {string} url */
+export async function newPassword(url) {
+  await runScript('db/new-password.ts', 'Setting the password', url);
+}
+
 async function runScript(script, what, url, signal, env = {}) {
   if (!existsSync(path.join(ROOT, script))) return;
   const code = await run(process.execPath, ['--import', 'tsx', script], {

@@ -21,3 +21,17 @@ export function insertAccount(
     .returning('id')
     .executeTakeFirst();
 }
+
+/** Changes the password and ends every session of the account; false when there is no such account. */
+export function setPassword(db: Kysely<Database>, email: string, passwordHash: string): Promise<boolean> {
+  return db.transaction().execute(async (trx) => {
+    const account = await trx
+      .updateTable('account')
+      .set({ password_hash: passwordHash })
+      .where('email', '=', email)
+      .returning('id')
+      .executeTakeFirst();
+    if (account) await trx.deleteFrom('session').where('account_id', '=', account.id).execute();
+    return account !== undefined;
+  });
+}

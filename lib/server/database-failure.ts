@@ -14,8 +14,7 @@ function means(error: Error): boolean {
 const REFUSAL: Refusal = {
   ok: false,
   code: 'database unavailable',
-  message:
-    'The database does not answer. Nothing was changed and what you typed is still here: try again in a moment.',
+  message: 'The database does not answer. Nothing was changed or lost: try again in a moment.',
 };
 
 /** Runs the work; a database that cannot be reached becomes a value, every other fault is thrown on. */

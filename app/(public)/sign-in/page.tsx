@@ -24,7 +24,7 @@ export default async function SignInPage({ searchParams }: SignInPageProps) {
         <h2 className="mb-2 text-h3 text-ink">The first account</h2>
         <p className="mb-4">
           The first start printed its e-mail and a password in the terminal, once. The password is stored
-          nowhere; only its hash is.
+          nowhere; only its hash is. Whoever lost it makes a new one with <code>npm run db -- password</code>.
         </p>
         <h2 className="mb-2 text-h3 text-ink">Without an account</h2>
         <p>

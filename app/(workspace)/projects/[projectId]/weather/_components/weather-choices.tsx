@@ -62,7 +62,7 @@ function ChoiceButtons({ projectId, year, chosen }: ChoiceButtonsProps) {
         <form action={choose}>
           {hidden}
           <button type="submit" className="framed" disabled={choosing}>
-            Use this year<span className="sr-only">: {year.name}</span>
+            Use this year<span className="sr-only"> of {year.name}</span>
           </button>
         </form>
       )}
