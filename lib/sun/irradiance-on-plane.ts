@@ -5,7 +5,7 @@ import { toRadians } from '@/lib/units/constants';
 export type SkyModel = 'isotropic' | 'hay-davies' | 'hdkr' | 'perez';
 
 /** cos 89°: smallest cos θz that a ratio is formed with, so that the last minutes of a day do not explode. */
-export const MIN_COS_ZENITH = 0.01745;
+const MIN_COS_ZENITH = 0.01745;
 
 /** Sun and sky of one moment. Irradiances may be in any one unit, e.g. all in W/m² or all in MJ/m². */
 export interface SkyMoment {

@@ -8,7 +8,7 @@ import { KELVIN_OFFSET, STEFAN_BOLTZMANN, toRadians } from '@/lib/units/constant
  * @returns ε [-]
  * @see P. Berdahl & M. Martin, Emissivity of clear skies, Solar Energy 32 (1984) 663
  */
-export function clearSkyEmittance(dewPointC: number, hour: number): number {
+function clearSkyEmittance(dewPointC: number, hour: number): number {
   return 0.711 + dewPointC * (0.0056 + 0.000073 * dewPointC) + 0.013 * Math.cos(toRadians(15 * hour));
 }
 
@@ -18,25 +18,12 @@ export function clearSkyEmittance(dewPointC: number, hour: number): number {
  * @param dewPointC θdp [°C] −20…30
  * @param hour t, hours from midnight [h] 0…24
  * @returns sky temperature [°C]
+ * @remarks clouds are left out: a grey sky is warmer and sends up to 80 W/m² more
  * @see P. Berdahl & M. Martin, Emissivity of clear skies, Solar Energy 32 (1984) 663
  */
 export function skyTemperatureC(dryBulbC: number, dewPointC: number, hour: number): number {
   const air = dryBulbC + KELVIN_OFFSET;
   return air * Math.pow(clearSkyEmittance(dewPointC, hour), 0.25) - KELVIN_OFFSET;
-}
-
-/**
- * Long-wave irradiance of the clear sky on the horizontal: EL = ε σ Ta⁴.
- * @param dryBulbC θa [°C] −40…45
- * @param dewPointC θdp [°C] −20…30
- * @param hour t, hours from midnight [h] 0…24
- * @returns EL [W/m²]
- * @remarks clouds are left out: a grey sky sends up to 80 W/m² more
- * @see P. Berdahl & M. Martin, Emissivity of clear skies, Solar Energy 32 (1984) 663
- */
-export function clearSkyLongwaveWm2(dryBulbC: number, dewPointC: number, hour: number): number {
-  const air2 = (dryBulbC + KELVIN_OFFSET) * (dryBulbC + KELVIN_OFFSET);
-  return clearSkyEmittance(dewPointC, hour) * STEFAN_BOLTZMANN * air2 * air2;
 }
 
 /**
@@ -47,4 +34,15 @@ export function clearSkyLongwaveWm2(dryBulbC: number, dewPointC: number, hour: n
  */
 export function swinbankSkyTemperatureC(dryBulbC: number): number {
   return 0.0552 * Math.pow(dryBulbC + KELVIN_OFFSET, 1.5) - KELVIN_OFFSET;
+}
+
+/**
+ * Long-wave irradiance on the horizontal of a sky that radiates like a black body: EL = σ Ts⁴.
+ * @param skyC sky temperature [°C] −60…40
+ * @returns EL [W/m²]
+ * @see J. A. Duffie & W. A. Beckman, Solar Engineering of Thermal Processes, 4th ed. 2013, sec. 3.9
+ */
+export function skyLongwaveWm2(skyC: number): number {
+  const sky2 = (skyC + KELVIN_OFFSET) * (skyC + KELVIN_OFFSET);
+  return STEFAN_BOLTZMANN * sky2 * sky2;
 }

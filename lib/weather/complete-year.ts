@@ -1,5 +1,9 @@
-import { clearSkyLongwaveWm2, swinbankSkyTemperatureC } from '@/lib/sun/sky-temperature';
-import { HOURS_PER_DAY, HOURS_PER_YEAR, STEFAN_BOLTZMANN, toKelvin } from '@/lib/units/constants';
+import {
+  skyLongwaveWm2 as longwaveOf,
+  skyTemperatureC,
+  swinbankSkyTemperatureC,
+} from '@/lib/sun/sky-temperature';
+import { HOURS_PER_DAY, HOURS_PER_YEAR } from '@/lib/units/constants';
 import { standardPressurePa } from '@/lib/weather/air-pressure';
 import { checkRows } from '@/lib/weather/check-rows';
 import { checkSite } from '@/lib/weather/check-site';
@@ -54,18 +58,8 @@ export function completeYear(head: YearHead, table: HourTable, options: ReadOpti
   fillHumidityAndSky(columns, notes);
   fillPressure(columns, head.elevationM, notes);
   fillAlbedo(columns, notes);
-  const { dryBulbC, globalWm2, beamNormalWm2, diffuseWm2, windMPerS, skyLongwaveWm2, pressurePa, albedo } =
-    columns;
-  return {
-    ok: true,
-    year: {
-      ...head,
-      synthetic: false,
-      ...{ dryBulbC, globalWm2, beamNormalWm2, diffuseWm2, windMPerS, skyLongwaveWm2, pressurePa, albedo },
-      dewPointC: columns.dewPointC,
-      notes,
-    },
-  };
+  const { relativeHumidity: _, ...kept } = columns;
+  return { ok: true, year: { ...head, synthetic: false, ...kept, notes } };
 }
 
 function dropNegatives(columns: HourColumns, table: HourTable, notes: WeatherNote[]): void {
@@ -97,9 +91,9 @@ function fillHumidityAndSky(columns: HourColumns, notes: WeatherNote[]): void {
     }
     if (skyLongwaveWm2[h]! >= MIN_SKY_LONGWAVE_WM2) continue;
     derivedSky++;
-    skyLongwaveWm2[h] = humid
-      ? clearSkyLongwaveWm2(air, dew[h]!, (h % HOURS_PER_DAY) + 0.5)
-      : STEFAN_BOLTZMANN * Math.pow(toKelvin(swinbankSkyTemperatureC(air)), 4);
+    const hour = (h % HOURS_PER_DAY) + 0.5;
+    const skyC = humid ? skyTemperatureC(air, dew[h]!, hour) : swinbankSkyTemperatureC(air);
+    skyLongwaveWm2[h] = longwaveOf(skyC);
   }
   if (noHumidity > 0) {
     const message = `${hourCount(noHumidity)} without humidity: dew point taken as the lowest temperature of the day.`;

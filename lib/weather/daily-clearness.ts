@@ -39,20 +39,6 @@ function meanClearness(gamma: number, max: number): number {
 }
 
 /**
- * Share of the days of a month that are less clear: F(K).
- * @param clearness K of a day [-]
- * @param monthlyClearness K̄ [-] 0.2…0.75
- * @returns F [-] 0…1
- * @see Bendt, Collares-Pereira & Rabl, Solar Energy 27 (1981) 1
- */
-export function clearnessShare(clearness: number, monthlyClearness: number): number {
-  const max = maxDailyClearness(monthlyClearness);
-  const gamma = clearnessShape(monthlyClearness);
-  const k = Math.min(max, Math.max(MIN_CLEARNESS, clearness));
-  return Math.expm1(gamma * (k - MIN_CLEARNESS)) / Math.expm1(gamma * (max - MIN_CLEARNESS));
-}
-
-/**
  * Clearness of the day below which a share of the month's days lies: the inverse of F(K).
  * @param share F [-] 0…1
  * @param monthlyClearness K̄ [-] 0.2…0.75

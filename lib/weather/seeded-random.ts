@@ -23,7 +23,7 @@ export function seededRandom(seed: number): Random {
  * @returns one number of mean 0 and standard deviation 1 [-]
  * @see G. E. P. Box & M. E. Muller, Ann. Math. Statist. 29 (1958) 610
  */
-export function standardNormal(random: Random): number {
+function standardNormal(random: Random): number {
   return Math.sqrt(-2 * Math.log(1 - random())) * Math.cos(2 * Math.PI * random());
 }
 

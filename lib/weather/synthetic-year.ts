@@ -1,5 +1,5 @@
 import { splitGlobal } from '@/lib/sun/diffuse-fraction';
-import { clearSkyLongwaveWm2 } from '@/lib/sun/sky-temperature';
+import { skyLongwaveWm2, skyTemperatureC } from '@/lib/sun/sky-temperature';
 import { type SunYear, sunYear } from '@/lib/sun/sun-year';
 import { HOURS_PER_DAY, HOURS_PER_YEAR } from '@/lib/units/constants';
 import { standardPressurePa } from '@/lib/weather/air-pressure';
@@ -48,7 +48,7 @@ export function syntheticYear(climate: MonthlyClimate): WeatherResult {
     windMPerS,
     dewPointC,
     skyLongwaveWm2: dryBulbC.map((air, h) =>
-      clearSkyLongwaveWm2(air, dewPointC[h]!, (h % HOURS_PER_DAY) + 0.5),
+      skyLongwaveWm2(skyTemperatureC(air, dewPointC[h]!, (h % HOURS_PER_DAY) + 0.5)),
     ),
     pressurePa: new Float64Array(HOURS_PER_YEAR).fill(standardPressurePa(climate.elevationM)),
     albedo: new Float64Array(HOURS_PER_YEAR).fill(DEFAULT_ALBEDO),

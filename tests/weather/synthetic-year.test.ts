@@ -1,12 +1,14 @@
 import { describe, expect, it } from 'vitest';
 import { climates, climateYear } from '@/data/climates/climates';
+import { dailyExtraterrestrialWhPerM2 } from '@/lib/sun/extraterrestrial';
 import { planeYear } from '@/lib/sun/plane-year';
 import { type SunYear, sunYear } from '@/lib/sun/sun-year';
 import { DAYS_IN_MONTH, MONTH_START_HOUR } from '@/lib/units/constants';
-import { clearnessShape, clearnessShare, maxDailyClearness } from '@/lib/weather/daily-clearness';
+import { clearnessQuantile, clearnessShape, maxDailyClearness } from '@/lib/weather/daily-clearness';
 import { monthlyClearness, type MonthlyClimate } from '@/lib/weather/monthly-climate';
 import { seededRandom } from '@/lib/weather/seeded-random';
 import { dailyClearness } from '@/lib/weather/synthetic-irradiance';
+import { diurnalSwing } from '@/lib/weather/synthetic-temperature';
 import { syntheticYear } from '@/lib/weather/synthetic-year';
 import type { WeatherYear } from '@/lib/weather/weather-year';
 import { chicagoMeans } from './example-climate';
@@ -31,6 +33,18 @@ function lagOne(values: ArrayLike<number>): number {
 
 function monthSlices(values: Float64Array): Float64Array[] {
   return DAYS_IN_MONTH.map((_, m) => values.subarray(MONTH_START_HOUR[m]!, MONTH_START_HOUR[m + 1]!));
+}
+
+/** F(K): share of the days that are less clear, by halving on its inverse. */
+function clearnessShare(clearness: number, monthly: number): number {
+  const gamma = clearnessShape(monthly);
+  let [low, high] = [0, 1];
+  for (let step = 0; step < 40; step++) {
+    const share = (low + high) / 2;
+    if (clearnessQuantile(share, monthly, gamma) < clearness) low = share;
+    else high = share;
+  }
+  return low;
 }
 
 /** Clearness of each hour less that of its day and the mean of that difference in month and hour; NaN near the horizon. */
@@ -72,6 +86,15 @@ describe('distribution of daily clearness', () => {
   });
 });
 
+describe('mean day of the air temperature', () => {
+  // Erbs, Klein & Beckman 1983 (from memory); values derived from the equation
+  it.each([
+    [1, -0.274],
+    [6, -0.451],
+    [15, 0.525],
+  ])('at %i h', (hour, swing) => expect(diurnalSwing(hour)).toBeCloseTo(swing, 3));
+});
+
 const southern: MonthlyClimate = {
   ...chicagoMeans,
   latitudeDeg: -43.5,
@@ -110,12 +133,15 @@ describe.each([...climates, chicagoMeans, southern])('synthetic year: $name, $la
   });
 
   it('has the distribution of clear and grey days in every month', () => {
-    const days = dailyClearness(climate, seededRandom(climate.seed));
     let first = 0;
     DAYS_IN_MONTH.forEach((count, m) => {
       const k = monthlyClearness(climate, m);
-      const sorted = Array.from(days.subarray(first, first + count)).sort((a, b) => a - b);
-      const distance = sorted.map((day, i) => Math.abs(clearnessShare(day, k) - (i + 0.5) / count));
+      const days = Array.from({ length: count }, (_, i) => {
+        const start = 24 * (first + i);
+        const daily = mean(year.globalWm2.subarray(start, start + 24)) * 24;
+        return daily / dailyExtraterrestrialWhPerM2(climate.latitudeDeg, first + i + 1);
+      }).sort((a, b) => a - b);
+      const distance = days.map((day, i) => Math.abs(clearnessShare(day, k) - (i + 0.5) / count));
       expect(Math.max(...distance)).toBeLessThan(0.25);
       first += count;
     });
