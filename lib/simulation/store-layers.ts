@@ -199,6 +199,37 @@ export class StoreLayers {
     if (!sorted) this.mergeInversions();
   }
 
+  /**
+   * A sub-step in which nothing flows: conduction by one explicit stage, loss by two terms of its exponential.
+   * Quiet hours are half of a winter array's year, so they are kept cheap.
+   */
+  rest(): void {
+    const { t, dtS, lossPerS, lossWPerK, roomC: room } = this;
+    const last = this.count - 1;
+    const perLayer = dtS / this.layerKg;
+    const conduction = this.conductionKgPerS;
+    let lost = 0;
+    let above = 0;
+    let here = t[0]!;
+    for (let i = 0; i < last; i++) {
+      const below = t[i + 1]!;
+      const carried = conduction * (here - below);
+      const x = lossPerS[i]! * dtS;
+      const excess = (here - room) * (1 - 0.5 * x);
+      lost += lossWPerK[i]! * excess;
+      t[i] = here + (above - carried) * perLayer - x * excess;
+      above = carried;
+      here = below;
+    }
+    const share = this.layerKg / this.bottomKg;
+    const x = lossPerS[last]! * dtS * share;
+    const excess = (here - room) * (1 - 0.5 * x);
+    lost += lossWPerK[last]! * excess;
+    t[last] = here + above * perLayer * share - x * excess;
+    this.lossJ = lost * dtS;
+    this.settle();
+  }
+
   /** Mixes layers that lie under colder ones, from the unstable pair outward (pool adjacent violators). */
   mergeInversions(): void {
     const mass = this.mergedMass;

@@ -266,9 +266,11 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
           tally.book(loop, areaM2 * absorbedWm2 * dt, dt);
           if (bottomC < tally.coldestInletC) tally.coldestInletC = bottomC;
         } else {
-          flows.chargeLevel = 0;
-          store.predict();
-          store.correct();
+          if (heatingKgPerS + preheatKgPerS > 0) {
+            flows.chargeLevel = 0;
+            store.predict();
+            store.correct();
+          } else store.rest();
           if (mounted) {
             loop.advanceEmpty();
             tally.book(loop, areaM2 * absorbedWm2 * dt, 0);
@@ -277,8 +279,10 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
               tally.bookUnused(areaM2, absorbedWm2, loop.a1, plan.array.a2, bottomC - outdoorC, dt);
           }
         }
-        storeHeatJ += heatingKgPerS * CP * (store.topMeanC - returnC) * dt;
-        tapHeatJ += preheatKgPerS * CP * flows.effectiveness * (store.topMeanC - mainsC) * dt;
+        if (heatingKgPerS > 0) storeHeatJ += heatingKgPerS * CP * (store.topMeanC - returnC) * dt;
+        if (preheatKgPerS > 0) {
+          tapHeatJ += preheatKgPerS * CP * flows.effectiveness * (store.topMeanC - mainsC) * dt;
+        }
         lossJ += store.lossJ;
         rest -= dt;
         subSteps++;
