@@ -71,7 +71,7 @@ test('a new house gets a weather file: refused, repaired, kept, chosen; then the
   await expect(page.getByText('hill.epw')).toHaveCount(0);
 
   await page.goto('/projects');
-  await page.getByText('Delete Weather Cottage').click();
+  await page.locator('summary', { hasText: 'Delete Weather Cottage' }).click();
   await page.getByRole('button', { name: 'Delete Weather Cottage for good' }).click();
   await expect(page.getByRole('link', { name: 'Weather Cottage' })).toHaveCount(0);
 });
