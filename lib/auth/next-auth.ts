@@ -60,7 +60,8 @@ export const { handlers, auth, signIn, signOut } = NextAuth(() => ({
   logger: {
     // A wrong password is no fault of the server's, and its stack would fill the log.
     error(error) {
-      if (!(error instanceof CredentialsSignin)) process.stderr.write(`[sign-in] ${error.name}: ${error.message}\n`);
+      if (!(error instanceof CredentialsSignin))
+        process.stderr.write(`[sign-in] ${error.name}: ${error.message}\n`);
     },
     warn: () => undefined,
     debug: () => undefined,
