@@ -158,9 +158,9 @@ describe('annual solar fraction of the standard system against the monthly corre
     it.each(COVERS)(
       `${climate.name}, %s: not below the months, for dark winters at most 0.12 above`,
       (cover) => {
-        for (const difference of differences(climate.weatherYear(), cover)) {
-          expect(difference).toBeGreaterThan(-BAND);
-          expect(difference).toBeLessThan(0.12);
+        for (const { words, difference } of cases(climate.weatherYear(), cover)) {
+          expect(difference, words).toBeGreaterThan(-BAND);
+          expect(difference, words).toBeLessThan(0.12);
         }
       },
     );
