@@ -4,13 +4,13 @@ import { accessSync, chownSync, constants, mkdirSync, readFileSync, statSync } f
 import os from 'node:os';
 import path from 'node:path';
 import { ROOT } from './paths.mjs';
-import { Refusal, say } from './say.mjs';
+import { Refusal } from './say.mjs';
 
 /**
  * Where the cluster lives and as whom it runs. PostgreSQL refuses to run as root: root runs it as the
  * owner of the data at hand, else as Debian's user "postgres"; everybody else as oneself.
  * @typedef {{ folder: string, data: string, log: string, info: string, lock: string, holders: string,
- *   account: { uid: number, gid: number } | undefined }} ClusterHome
+ *   account: { uid: number, gid: number } | undefined, notice?: string }} ClusterHome
  * @returns {ClusterHome}
  */
 export function clusterHome() {
@@ -22,9 +22,10 @@ function homeForRoot() {
   const account = ownerOf(path.join(inCheckout, 'data')) ?? debianAccount();
   if (canEnter(ROOT, account)) return layOut(inCheckout, account);
   const elsewhere = path.join('/var/lib/tepidarium', checkoutKey());
-  mkdirSync(elsewhere, { recursive: true });
-  say(`PostgreSQL may not enter this folder, so its data is kept in ${elsewhere}`);
-  return layOut(elsewhere, ownerOf(path.join(elsewhere, 'data')) ?? account);
+  return {
+    ...layOut(elsewhere, ownerOf(path.join(elsewhere, 'data')) ?? account),
+    notice: `PostgreSQL may not enter this folder, so its data is kept in ${elsewhere}`,
+  };
 }
 
 function homeForUser() {
@@ -34,9 +35,10 @@ function homeForUser() {
     return layOut(inCheckout, undefined);
   const state = process.env.XDG_STATE_HOME ?? path.join(os.homedir(), '.local/state');
   const elsewhere = path.join(state, 'tepidarium', checkoutKey());
-  mkdirSync(elsewhere, { recursive: true });
-  say(`The database in .postgres belongs to another user, so yours is kept in ${elsewhere}`);
-  return layOut(elsewhere, undefined);
+  return {
+    ...layOut(elsewhere, undefined),
+    notice: `The database in .postgres belongs to another user, so yours is kept in ${elsewhere}`,
+  };
 }
 
 function layOut(folder, account) {

@@ -24,6 +24,7 @@ const START_PATIENCE_MS = 20_000;
 export async function holdCluster({ install, signal }) {
   await postgresBinaries(undefined, { install, signal });
   const home = clusterHome();
+  if (home.notice) say(home.notice);
   const info = await withLock(home.lock, () => runAndEnter(home, { install, signal }), { signal });
   return {
     url: (database) => databaseUrl(info, database),
