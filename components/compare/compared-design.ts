@@ -18,8 +18,8 @@ export interface ComparedDesign {
   weatherName: string;
   synthetic: boolean;
   roomSetC: number;
-  /** one byte per hour: index into the carriers, or the mark of an empty array too hot [8760] */
-  stones: Uint8Array;
+  /** one digit per hour: index into the carriers, or the mark of an empty array too hot; see `readStones` */
+  stones: string;
   /** solar fraction [-] */
   solarShare: number;
   solarKwh: number;
@@ -58,6 +58,18 @@ function worstPart(result: YearResult): ComparedDesign['hotPart'] {
   );
 }
 
+/** The same designs under the part of their name before a comma, where that tells them apart. */
+export function withShortNames(designs: readonly ComparedDesign[]): ComparedDesign[] {
+  const short = designs.map(({ name }) => name.split(',')[0]!.trim());
+  const telling = new Set(short).size === designs.length;
+  return designs.map((design, i) => (telling ? { ...design, name: short[i]! } : design));
+}
+
+/** The stones of a comparison as bytes [8760]; they travel as digits, which pages compress well. */
+export function readStones(digits: string): Uint8Array {
+  return Uint8Array.from(digits, Number);
+}
+
 /** Draws the figures of a comparison from one simulated year. */
 export function comparedDesign(
   id: string,
@@ -67,7 +79,7 @@ export function comparedDesign(
   result: YearResult,
 ): ComparedDesign {
   const { year } = result;
-  const cost = designCost(design, prices, result, house.backup.seasonalEfficiency);
+  const cost = designCost(design, prices, result);
   const stones = new Uint8Array(HOURS_PER_YEAR);
   packCarriers(result.columns, stones);
   const presentUpkeep = cost.heat.receipt
@@ -82,7 +94,7 @@ export function comparedDesign(
     weatherName: result.weatherName,
     synthetic: result.synthetic,
     roomSetC: house.roomSetC,
-    stones,
+    stones: stones.join(''),
     solarShare: year.fractions.solar,
     solarKwh: year.solarHeatingKwh + year.solarTapKwh,
     backupHeatKwh: year.backupHeatingKwh + year.backupTapKwh,

@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
 import { FIRST_OF_JULY } from '@/components/mosaic/stones';
-import type { ComparedDesign } from './compared-design';
+import { withShortNames, type ComparedDesign } from './compared-design';
 import { differences, notLikeForLike, type Terms } from './differences';
 import { headline } from './headline';
 import { ReceiptTable } from './receipt-table';
@@ -20,11 +20,12 @@ interface ComparisonProps {
 
 /** Two to four designs of one house: a sentence, their years above each other, the differences, the receipt. */
 export function Comparison({ designs, terms, fuel, latitudeDeg, links, rateLink }: ComparisonProps) {
-  const warning = notLikeForLike(designs);
+  const short = withShortNames(designs);
+  const warning = notLikeForLike(short);
   return (
     <>
-      <h1 className="my-5 max-w-[62rem] text-verdict font-verdict">
-        {headline(designs, terms.currency).map((part, i) =>
+      <h1 className="my-5 max-w-[74rem] text-verdict font-verdict text-pretty">
+        {headline(short, terms.currency).map((part, i) =>
           typeof part === 'string' ? (
             part
           ) : (
@@ -51,7 +52,7 @@ export function Comparison({ designs, terms, fuel, latitudeDeg, links, rateLink 
             The differences in words
           </h2>
           <dl className="rule-ink">
-            {differences(designs, terms).map(({ title, sentence }) => (
+            {differences(short, terms).map(({ title, sentence }) => (
               <div
                 key={title}
                 className="grid gap-x-6 gap-y-1 py-2 rule-hair sm:grid-cols-[12rem_minmax(0,1fr)]"
@@ -68,7 +69,7 @@ export function Comparison({ designs, terms, fuel, latitudeDeg, links, rateLink 
               ` Weather year: ${designs[0]!.weatherName}, synthetic: not for a real decision.`}
           </p>
         </section>
-        <ReceiptTable designs={designs} terms={terms} fuel={fuel} {...(rateLink ? { rateLink } : {})} />
+        <ReceiptTable designs={short} terms={terms} fuel={fuel} {...(rateLink ? { rateLink } : {})} />
       </div>
     </>
   );

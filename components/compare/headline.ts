@@ -16,16 +16,17 @@ export function headline(designs: readonly ComparedDesign[], currency: string): 
     text: pricePerKwh(design.costPerKwh, currency),
     course: 'ink',
   });
-  const parts: HeadlinePart[] = [`${cheapest.name} gives the cheapest sun heat at `, price(cheapest)];
+  const parts: HeadlinePart[] = [`The cheapest sun heat comes from ${cheapest.name} at `, price(cheapest)];
   const sound = byCost.find(({ hotHours }) => hotHours === 0);
   if (cheapest.hotHours > 0) {
-    parts.push(', but stands too hot when empty');
-    if (sound) parts.push(`; of those that do not, ${sound.name} is the cheapest at `, price(sound));
+    parts.push(', too hot when it stands empty');
+    if (sound) parts.push(`; among those that bear it, from ${sound.name} at `, price(sound));
   }
   const most = [...designs].sort((a, b) => b.solarShare - a.solarShare)[0]!;
-  const share: HeadlinePart = { text: formatShare(most.solarShare), course: 'sun' };
-  if (most === cheapest && !(cheapest.hotHours > 0))
-    parts.push(' and carries the most, ', share, ' of the heat.');
-  else parts.push(`; ${most.name} carries the most, `, share, ' of the heat.');
+  parts.push(
+    '; the most, ',
+    { text: formatShare(most.solarShare), course: 'sun' },
+    ` of all heat, from ${most.name}.`,
+  );
   return parts;
 }

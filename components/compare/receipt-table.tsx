@@ -11,9 +11,14 @@ function Leader({ children }: { children: ReactNode }) {
   return (
     <span className="flex items-baseline gap-2">
       {children}
-      <span aria-hidden="true" className="min-w-4 flex-1 border-b border-dotted border-line" />
+      <span aria-hidden="true" className="min-w-4 flex-1 border-b border-dotted border-line max-sm:hidden" />
     </span>
   );
+}
+
+function ownHoursWords(designs: readonly ComparedDesign[]): string {
+  const hours = designs.map(({ ownHours }) => formatTyped(ownHours));
+  return new Set(hours).size === 1 ? `${hours[0]} hours each` : `${hours.join(', ')} hours`;
 }
 
 interface ReceiptTableProps {
@@ -33,16 +38,17 @@ export function ReceiptTable({ designs, terms, fuel, rateLink }: ReceiptTablePro
   const rows = receiptRows(designs);
   return (
     <section aria-labelledby="receipt-title">
+      <h2 id="receipt-title" className="sm:-mb-6 sm:max-w-[50%]">
+        What a kilowatt-hour costs
+      </h2>
       <table className="w-full">
         <thead>
           <tr>
             <th scope="col">
-              <h2 id="receipt-title" className="text-ink">
-                What a kilowatt-hour costs
-              </h2>
+              <span className="sr-only">Part of the cost</span>
             </th>
             {designs.map(({ id, name }) => (
-              <th key={id} scope="col" data-number className="w-[5.5rem]">
+              <th key={id} scope="col" data-number className="w-16 sm:w-24">
                 {name}
               </th>
             ))}
@@ -88,7 +94,7 @@ export function ReceiptTable({ designs, terms, fuel, rateLink }: ReceiptTablePro
         {cents(designs[0]?.backupPerKwh)} {unit}.{' '}
         {unpriced && (
           <>
-            † {designs.map(({ ownHours }) => formatTyped(ownHours)).join(', ')} hours, not priced
+            † {ownHoursWords(designs)}, not priced
             {rateLink ? <>: {rateLink}</> : '.'}
           </>
         )}

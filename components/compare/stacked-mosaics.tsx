@@ -1,13 +1,13 @@
 'use client';
 
-import { useState, type ReactNode } from 'react';
+import { useMemo, useState, type ReactNode } from 'react';
 import { MONTHS, MONTH_FIRST_DAY, monthOrder } from '@/components/mosaic/calendar';
 import { LegendLine } from '@/components/mosaic/legend';
 import { DAYS_SHOWN, columnOfDay } from '@/components/mosaic/stones';
 import { Segmented } from '@/components/ui/segmented';
 import { formatFixed, formatTyped, withUnit } from '@/lib/units/display';
-import { countChanges, markUnchanged } from './changes';
-import type { ComparedDesign } from './compared-design';
+import { countChanges, markUnchanged, type Changes } from './changes';
+import { readStones, type ComparedDesign } from './compared-design';
 import { DesignFigures } from './design-figures';
 import { StonesPicture } from './stones-picture';
 
@@ -28,15 +28,14 @@ const COVER_WORDS: Record<ComparedDesign['cover'], string> = {
 
 const hours = (count: number) => formatFixed(count);
 
-function aboutWords(design: ComparedDesign, first: ComparedDesign): string {
+function aboutWords(design: ComparedDesign, changes: Changes | undefined, first: string): string {
   const build = `${withUnit(formatTyped(design.areaM2), 'm²')}, ${COVER_WORDS[design.cover]}, ${withUnit(formatTyped(design.volumeL), 'L')}`;
-  if (design === first) return `${build}: the measure for the others`;
-  const changes = countChanges(design.stones, first.stones);
+  if (!changes) return `${build}: the measure for the others`;
   const gain = changes.backupToSun >= changes.sunToBackup;
   const kind = gain
     ? `${hours(changes.backupToSun)} of them from backup to sun`
     : `${hours(changes.sunToBackup)} of them from sun to backup`;
-  return `${build}. ${hours(changes.hours)} hours change hands against ${first.name}, ${kind}`;
+  return `${build}. ${hours(changes.hours)} hours change hands against ${first}, ${kind}`;
 }
 
 function HourAxis() {
@@ -54,7 +53,7 @@ function HourAxis() {
 
 function MonthAxis({ firstDay }: { firstDay: number }) {
   return (
-    <div className="relative ml-7 h-6 font-display italic lg:mr-[240px]" aria-hidden="true">
+    <div className="relative ml-7 h-6 font-display italic lg:mr-[224px]" aria-hidden="true">
       {monthOrder(firstDay).map((month) => (
         <span
           key={month}
@@ -81,6 +80,14 @@ interface StackedMosaicsProps {
 export function StackedMosaics({ designs, currency, firstDay, links }: StackedMosaicsProps) {
   const [view, setView] = useState<View>('changes');
   const first = designs[0]!;
+  const years = useMemo(() => {
+    const measure = readStones(first.stones);
+    return designs.map((design, place) => {
+      const stones = readStones(design.stones);
+      if (place === 0) return { stones, changed: stones, changes: undefined };
+      return { stones, changed: markUnchanged(stones, measure), changes: countChanges(stones, measure) };
+    });
+  }, [designs, first]);
   return (
     <div>
       <div className="mb-3 flex flex-wrap items-center justify-between gap-x-8 gap-y-2">
@@ -90,13 +97,13 @@ export function StackedMosaics({ designs, currency, firstDay, links }: StackedMo
         <LegendLine />
       </div>
       {designs.map((design, place) => {
-        const about = aboutWords(design, first);
-        const inked = view === 'all' || place === 0;
+        const { stones, changed, changes } = years[place]!;
+        const about = aboutWords(design, changes, first.name);
         return (
           <section
             key={design.id}
             aria-label={design.name}
-            className="mb-4 grid grid-cols-[1.75rem_minmax(0,1fr)] gap-y-1 lg:grid-cols-[1.75rem_minmax(0,1fr)_200px] lg:gap-x-0"
+            className="mb-4 grid grid-cols-[1.75rem_minmax(0,1fr)] gap-y-1 lg:grid-cols-[1.75rem_minmax(0,1fr)_224px]"
           >
             <p className="col-span-full lg:col-span-1 lg:col-start-2">
               <span className="font-display text-h3 font-heading">{design.name}</span>{' '}
@@ -104,18 +111,16 @@ export function StackedMosaics({ designs, currency, firstDay, links }: StackedMo
                 {about}. {links?.[place]}
               </span>
             </p>
-            <div className="contents">
-              <div className="col-start-1 grid lg:row-start-2">
-                <HourAxis />
-              </div>
-              <div className="col-start-2 min-w-0 lg:row-start-2">
-                <StonesPicture
-                  stones={inked ? design.stones : markUnchanged(design.stones, first.stones)}
-                  firstDay={firstDay}
-                  rowPx={ROW_PX}
-                  label={`${design.name}: ${about}.`}
-                />
-              </div>
+            <div className="col-start-1 grid lg:row-start-2">
+              <HourAxis />
+            </div>
+            <div className="col-start-2 min-w-0 lg:row-start-2">
+              <StonesPicture
+                stones={view === 'all' ? stones : changed}
+                firstDay={firstDay}
+                rowPx={ROW_PX}
+                label={`${design.name}: ${about}.`}
+              />
             </div>
             <div className="col-span-full lg:col-span-1 lg:col-start-3 lg:row-span-2 lg:row-start-1 lg:-mr-0 lg:ml-6 lg:w-[200px] lg:pt-2">
               <DesignFigures design={design} currency={currency} />

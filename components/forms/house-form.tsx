@@ -21,6 +21,7 @@ const CONTENTS: readonly ContentsEntry[] = [
       'volumeM3',
       'capacityClass',
       'roomSetC',
+      'setback',
       'designOutdoorC',
       'internalGainsW',
     ],
@@ -70,6 +71,10 @@ export function HouseForm({ projectId, stored, currency, save, frieze }: HouseFo
           <Field path="volumeM3" />
           <Field path="capacityClass" />
           <Field path="roomSetC" />
+          <Field path="setback.on" />
+          <Field path="setback.nightC" />
+          <Field path="setback.fromHour" />
+          <Field path="setback.toHour" />
           <Field path="designOutdoorC" />
           <Field path="internalGainsW" />
         </FieldRow>
@@ -123,6 +128,9 @@ export function HouseForm({ projectId, stored, currency, save, frieze }: HouseFo
           <Field path="backup.fuel" />
           <Field path="backup.ratedW" />
           <Field path="backup.seasonalEfficiency" />
+          <Field path="backup.heatPump.source" />
+          <Field path="backup.heatPump.groundC" />
+          <Field path="backup.heatPump.carnotShare" />
         </FieldRow>
       </FormSection>
     </SchemaForm>

@@ -69,7 +69,7 @@ export function QuantityField({ path, meta, inTable = false, name }: QuantityFie
           aria-invalid={inError}
           aria-describedby={`${id}-error ${id}-origin ${id}-help`}
           className="field w-full text-right"
-          style={{ paddingRight: unit ? `calc(${unit.length}ch + 0.9rem)` : undefined }}
+          style={{ paddingRight: unit ? `calc(${unit.length}ch + 1.2rem)` : undefined }}
         />
         <span className="pointer-events-none absolute inset-y-0 right-2 flex items-center unit">{unit}</span>
       </div>

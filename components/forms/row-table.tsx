@@ -29,7 +29,8 @@ interface RowTableProps {
   originField?: string;
   /** a column that is worked out from the row, with its head */
   derived?: { head: ReactNode; cell(index: number): ReactNode };
-  totals?: ReactNode;
+  /** sums under the columns, with the words that say of what */
+  totals?: { words: string; cells: Readonly<Record<string, string>>; derived: string };
 }
 
 function useRowSchema(path: string): z.ZodType {
@@ -146,7 +147,11 @@ export function RowTable(props: RowTableProps) {
               className="grid grid-cols-3 items-center gap-x-3 gap-y-1 py-1 rule-hair md:grid-cols-(--tracks)"
             >
               {columns.map(({ field }, c) => (
-                <div role="cell" key={field} className={c === 0 ? 'max-md:col-span-2' : ''}>
+                <div
+                  role="cell"
+                  key={field}
+                  className={c === 0 ? 'max-md:col-span-2 max-md:col-start-1 max-md:row-start-1' : ''}
+                >
                   <PhoneLabel schema={schemaAt(rowSchema, field)} currency={currency} />
                   <Field
                     path={`${path}.${index}.${field}`}
@@ -162,11 +167,11 @@ export function RowTable(props: RowTableProps) {
                 </div>
               )}
               {originField && (
-                <div role="cell" className="text-note text-muted max-md:col-span-2">
+                <div role="cell" className="text-note text-muted">
                   <RowOrigin path={`${path}.${index}.${originField}`} />
                 </div>
               )}
-              <div role="cell" className="text-right max-md:order-first max-md:col-start-3">
+              <div role="cell" className="text-right max-md:col-start-3 max-md:row-start-1">
                 <button
                   type="button"
                   aria-label={`Take out ${rowName(index)}`}
@@ -184,8 +189,8 @@ export function RowTable(props: RowTableProps) {
             </div>
           ))}
         </div>
+        {props.totals && <Totals {...props.totals} columns={columns} />}
       </div>
-      {props.totals}
       <p className="mt-2 flex flex-wrap items-center gap-x-4 gap-y-2">
         <button ref={addButton} type="button" className="framed" onClick={add}>
           {addWord}
@@ -204,6 +209,31 @@ export function RowTable(props: RowTableProps) {
           </button>
         )}
       </p>
+    </div>
+  );
+}
+
+function Totals({
+  words,
+  cells,
+  derived,
+  columns,
+}: NonNullable<RowTableProps['totals']> & { columns: readonly RowColumn[] }) {
+  return (
+    <div role="rowgroup" aria-live="polite">
+      <div
+        role="row"
+        className="flex flex-wrap justify-between gap-x-3 py-2 font-strong tabular-nums md:grid md:grid-cols-(--tracks)"
+      >
+        {columns.map(({ field }, place) => (
+          <span role="cell" key={field} className={place === 0 ? 'md:whitespace-nowrap' : 'text-right'}>
+            {place === 0 ? words : cells[field]}
+          </span>
+        ))}
+        <span role="cell" className="text-right">
+          {derived}
+        </span>
+      </div>
     </div>
   );
 }

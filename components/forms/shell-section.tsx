@@ -54,18 +54,13 @@ export function ShellSection() {
             return formatFixed(transmissionWPerK([element]), 1);
           },
         }}
-        totals={
-          <p
-            className="flex flex-wrap justify-between gap-x-6 py-2 font-strong tabular-nums"
-            aria-live="polite"
-          >
-            <span>
-              {held ? `Sum without ${held === 1 ? 'the held row' : `${held} held rows`}` : 'Sum of the shell'}
-            </span>
-            <span>{withUnit(formatFixed(loss.shellAreaM2, 1), 'm²')}</span>
-            <span>{withUnit(formatFixed(sumWPerK, 1), 'W/K')}</span>
-          </p>
-        }
+        totals={{
+          words: held
+            ? `Sum without ${held === 1 ? 'the held row' : `${held} held rows`}`
+            : 'Sum of the shell',
+          cells: { areaM2: formatFixed(loss.shellAreaM2, 1) },
+          derived: formatFixed(sumWPerK, 1),
+        }}
       />
       <LossStones loss={loss} />
       <BigFigures

@@ -1,6 +1,11 @@
 import { describe, expect, it } from 'vitest';
 import { countChanges, markUnchanged } from '@/components/compare/changes';
-import { comparedDesign, type ComparedDesign } from '@/components/compare/compared-design';
+import {
+  comparedDesign,
+  readStones,
+  withShortNames,
+  type ComparedDesign,
+} from '@/components/compare/compared-design';
 import { differenceInWords, differences, notLikeForLike } from '@/components/compare/differences';
 import { headline } from '@/components/compare/headline';
 import { ownHoursRow, receiptRows } from '@/components/compare/receipt';
@@ -21,7 +26,7 @@ const film: ComparedDesign = {
   weatherName: 'Upland',
   synthetic: true,
   roomSetC: 20.5,
-  stones: new Uint8Array(8760),
+  stones: '0'.repeat(8760),
   solarShare: 0.23,
   solarKwh: 3670,
   backupHeatKwh: 12500,
@@ -128,8 +133,8 @@ describe('headline', () => {
 
   it('never praises the cheapest heat without its dry temperature', () => {
     expect(words([film, twinWall, factory])).toBe(
-      'Twin-wall rows gives the cheapest sun heat at 0.078\u00a0€/kWh, but stands too hot when empty; ' +
-        'of those that do not, Film rows is the cheapest at 0.101\u00a0€/kWh; Twin-wall rows carries the most, 34\u00a0% of the heat.',
+      'The cheapest sun heat comes from Twin-wall rows at 0.078\u00a0€/kWh, too hot when it stands empty; ' +
+        'among those that bear it, from Film rows at 0.101\u00a0€/kWh; the most, 34\u00a0% of all heat, from Twin-wall rows.',
     );
   });
 
@@ -137,6 +142,22 @@ describe('headline', () => {
     expect(words([{ ...film, costPerKwh: Number.NaN }])).toBe(
       'None of these designs carries heat from the sun.',
     );
+  });
+});
+
+describe('short names', () => {
+  it('drop what follows a comma where the rest tells the designs apart', () => {
+    const names = (list: ComparedDesign[]) => withShortNames(list).map(({ name }) => name);
+    expect(names([{ ...film, name: 'Film rows, winter' }, twinWall])).toEqual([
+      'Film rows',
+      'Twin-wall rows',
+    ]);
+    expect(
+      names([
+        { ...film, name: 'Film, 20' },
+        { ...film, name: 'Film, 30' },
+      ]),
+    ).toEqual(['Film, 20', 'Film, 30']);
   });
 });
 
@@ -187,6 +208,7 @@ describe('the demonstration, compared', () => {
   it('shows a homemade film design that bears its dry days beside a selective-coated one', () => {
     const filmRows = compared.find(({ cover }) => cover === 'film')!;
     const selective = compared.find(({ cover }) => cover === 'selective glass')!;
+    expect(readStones(filmRows.stones)).toHaveLength(8760);
     expect(filmRows.hotHours).toBe(0);
     expect(selective.solarShare).toBeGreaterThan(0);
     expect(filmRows.solarShare).toBeGreaterThan(0);

@@ -65,7 +65,7 @@ export function DesignList({ projectId, designs }: DesignListProps) {
               </p>
             </div>
             <Figures run={lastRun} />
-            <p className="flex flex-wrap gap-x-5 gap-y-1 md:justify-end">
+            <div className="flex flex-wrap gap-x-5 gap-y-1 md:justify-end">
               <Link href={`${base}/collector`}>
                 Collector<span className="sr-only"> of {name}</span>
               </Link>
@@ -73,7 +73,7 @@ export function DesignList({ projectId, designs }: DesignListProps) {
                 Loop and store<span className="sr-only"> of {name}</span>
               </Link>
               <DeleteDesign projectId={projectId} designId={id} name={name} />
-            </p>
+            </div>
           </li>
         );
       })}
