@@ -91,6 +91,18 @@ const layerRules = [
     'Schemas describe what the core takes; they do not run it.',
   ),
   forbid(
+    'reference-only-core',
+    { path: '^lib/reference/' },
+    { path: '^(lib|data|node_modules)/', pathNot: [CORE_FOLDERS, '^lib/reference/'] },
+    'A check calls the core and nothing else; it also runs in the browser.',
+  ),
+  forbid(
+    'reference-in-browser',
+    { path: '^lib/reference/' },
+    { dependencyTypes: ['core'] },
+    'The checks run in a browser worker too.',
+  ),
+  forbid(
     'schemas-low',
     { path: '^lib/schemas/' },
     { path: '^(app|components|workers|db|lib/(server|auth|mail|study))/' },
@@ -172,7 +184,8 @@ const hygieneRules = [
   ),
   forbid(
     'no-dev-packages',
-    { path: '^(app|components|lib|workers|db|data)/' },
+    // The method pages are written while the product is built, when the compiler is at hand.
+    { path: '^(app|components|lib|workers|db|data)/', pathNot: '^lib/method/source-tree' },
     { dependencyTypes: ['npm-dev'], dependencyTypesNot: ['type-only'], pathNot: 'node_modules/@types/' },
     'The product must run without the packages of its tests.',
   ),

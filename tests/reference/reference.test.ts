@@ -1,39 +1,19 @@
 import { describe, expect, it } from 'vitest';
-import { buildingRows } from './building-rows';
-import { collectorRows } from './collector-rows';
-import { emitterRows } from './emitter-rows';
-import { houseRows } from './house-rows';
-import { hydraulicsRows } from './hydraulics-rows';
-import { moneyRows } from './money-rows';
-import type { ReferenceRow } from './reference-row';
-import { storeAndWaterRows } from './store-and-water-rows';
-import { sunRows } from './sun-rows';
-import { systemRows } from './system-rows';
+import { checkRow } from '@/lib/reference/check-row';
+import type { ReferenceRow } from '@/lib/reference/reference-row';
+import { isRegression, referenceRows as rows } from '@/lib/reference/reference-rows';
 
-const rows: ReferenceRow[] = [
-  ...collectorRows,
-  ...emitterRows,
-  ...storeAndWaterRows,
-  ...hydraulicsRows,
-  ...buildingRows,
-  ...houseRows,
-  ...moneyRows,
-  ...sunRows,
-  ...systemRows,
-];
-const published = rows.filter((row) => row.tier !== 'C');
-const regression = rows.filter((row) => row.tier === 'C');
+const published = rows.filter((row) => !isRegression(row));
+const regression = rows.filter(isRegression);
 
 const words = (row: ReferenceRow) => `${row.id}: ${row.title} [${row.source}; ${row.provenance}]`;
 
 function check(row: ReferenceRow): void {
-  const actual = row.compute();
-  for (const [key, expected] of Object.entries(row.expected)) {
-    const stated = typeof row.tolerance === 'number' ? row.tolerance : row.tolerance[key];
-    if (stated === undefined) throw new Error(`${row.id}: no tolerance for ${key}`);
-    const tolerance = row.relative ? stated * Math.abs(expected) : stated;
-    const message = `${row.id} ${key}: ${actual[key]} instead of ${expected} ± ${tolerance} (${row.source})`;
-    expect(Math.abs(actual[key]! - expected), message).toBeLessThanOrEqual(tolerance);
+  for (const { name, computed, expected, tolerance, within } of checkRow(row)) {
+    expect(
+      within,
+      `${row.id} ${name}: ${computed} instead of ${expected} ± ${tolerance} (${row.source})`,
+    ).toBe(true);
   }
 }
 

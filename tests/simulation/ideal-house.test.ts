@@ -5,8 +5,8 @@ import { runYear, YearState } from '@/lib/simulation/year';
 import { monthSum, Tally } from '@/lib/simulation/tally';
 import { HOURS_PER_YEAR, J_PER_KWH } from '@/lib/units/constants';
 import type { CapacityClass } from '@/lib/physics/house-network';
-import { WAVE_YEARS } from '../reference/house-rows';
-import { waveSolarW, waveWeather } from './wave-weather';
+import { WAVE_YEARS } from '@/lib/reference/house-rows';
+import { waveSolarW, waveWeather } from '@/lib/reference/wave-weather';
 
 /** ISO 13790:2008 annex C, synthetic years A6: the year loop with ideal set point on the same five houses. */
 describe('year loop with ideal set point against the hourly calculation of ISO 13790', () => {

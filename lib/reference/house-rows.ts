@@ -1,6 +1,6 @@
 import { HouseNetwork, hourlyNeed, type CapacityClass, type NetworkInput } from '@/lib/physics/house-network';
 import { HOURS_PER_YEAR, J_PER_WH, SECONDS_PER_HOUR } from '@/lib/units/constants';
-import { waveOutdoorC, waveSolarW } from '../simulation/wave-weather';
+import { waveOutdoorC, waveSolarW } from './wave-weather';
 import type { ReferenceRow } from './reference-row';
 
 const ISO = 'ISO 13790:2008, annex C and clause 12.2 (text partly read in public, rest from memory)';

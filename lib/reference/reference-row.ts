@@ -1,9 +1,12 @@
+/** How the outside value of a check is known. */
+export type Provenance = 'read' | 'from memory' | 'derived' | 'common practice';
+
 /** One check of the product against an outside value. The runner computes, compares and prints the source. */
 export interface ReferenceRow {
   id: string;
   title: string;
   source: string;
-  provenance: 'read' | 'from memory' | 'derived' | 'common practice';
+  provenance: Provenance;
   /** A published output read, B published output from memory, C computed from the cited equation */
   tier: 'A' | 'B' | 'C';
   expected: Record<string, number>;

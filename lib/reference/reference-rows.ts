@@ -1,0 +1,28 @@
+import { buildingRows } from './building-rows';
+import { collectorRows } from './collector-rows';
+import { emitterRows } from './emitter-rows';
+import { houseRows } from './house-rows';
+import { hydraulicsRows } from './hydraulics-rows';
+import { moneyRows } from './money-rows';
+import type { ReferenceRow } from './reference-row';
+import { storeAndWaterRows } from './store-and-water-rows';
+import { sunRows } from './sun-rows';
+import { systemRows } from './system-rows';
+
+/** Every check against an outside value: run by the tests, by the method pages and in the visitor's browser. */
+export const referenceRows: readonly ReferenceRow[] = [
+  ...collectorRows,
+  ...emitterRows,
+  ...storeAndWaterRows,
+  ...hydraulicsRows,
+  ...buildingRows,
+  ...houseRows,
+  ...moneyRows,
+  ...sunRows,
+  ...systemRows,
+];
+
+/** Tier C rows repeat the cited equation with other means: they guard against changes, they are no outside evidence. */
+export function isRegression(row: Pick<ReferenceRow, 'tier'>): boolean {
+  return row.tier === 'C';
+}
