@@ -90,7 +90,7 @@ else if (flags.has('--example')) {
     },
     planeSums: planeSums(weather, file.design.array),
     ...result,
-    cost: designCost(file.design, file.prices, outcome.result, file.house.backup.seasonalEfficiency),
+    cost: designCost(file.design, file.prices, outcome.result),
     findings: findings({ house: file.house, design: file.design, result: outcome.result }),
     ...(flags.has('--columns') && {
       columns: Object.fromEntries(Object.entries(columns).map(([name, column]) => [name, asList(column)])),

@@ -41,7 +41,7 @@ async function answer({ weather: source, house, design, prices }: StudyQuestion)
   const outcome = simulator.run({ weather, house, design, numerics: NUMERICS });
   if (!outcome.ok) return outcome;
   const { result } = outcome;
-  const cost = designCost(design, prices, result, house.backup.seasonalEfficiency);
+  const cost = designCost(design, prices, result);
   return {
     ok: true,
     answer: { design, result, cost, findings: findings({ house, design, result }) },

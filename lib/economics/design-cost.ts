@@ -63,7 +63,6 @@ export interface DesignCost {
  * @param design areas [m²], pipe each way [m], store [L], collector prices [money/m²]
  * @param prices price list [money]
  * @param result simulated year [kWh]
- * @param backupEfficiency useful heat / bought energy [-]
  * @returns money and energies of the design
  * @see IEA SHC Task 54 form of the cost of heat, see `cost-of-heat.ts`; nothing for the house's own emitters or boiler
  */
@@ -71,7 +70,6 @@ export function designCost(
   design: PricedDesign,
   prices: PriceList,
   result: Pick<YearResult, 'year'>,
-  backupEfficiency: number,
 ): DesignCost {
   const { year } = result;
   const { areaM2, pipeLengthM } = design.array;
@@ -124,7 +122,7 @@ export function designCost(
     savedMoneyPerYear,
     boughtMoneyPerYear: year.boughtKwh * prices.fuelPerKwh + pumpMoney,
     referenceMoneyPerYear: year.referenceBoughtKwh * prices.fuelPerKwh,
-    backupHeatPerKwh: prices.fuelPerKwh / backupEfficiency,
+    backupHeatPerKwh: (prices.fuelPerKwh * year.referenceBoughtKwh) / year.referenceNeedKwh,
     fuelKg: year.boughtKwh / prices.fuelKwhPerKg,
     referenceFuelKg: year.referenceBoughtKwh / prices.fuelKwhPerKg,
     savedCo2KgPerYear: savedKwhPerYear * prices.fuelCo2KgPerKwh,

@@ -259,7 +259,10 @@ export const hotWaterSchema = z.object({
 });
 
 export const backupSchema = z.object({
-  fuel: z.enum(['pellets', 'wood', 'gas', 'oil', 'electric']).default('pellets').meta({ label: 'Fuel' }),
+  fuel: z
+    .enum(['pellets', 'wood', 'gas', 'oil', 'electric', 'heat pump'])
+    .default('pellets')
+    .meta({ label: 'Fuel' }),
   ratedW: quantity({
     label: 'Rated power',
     unit: 'W',
@@ -281,6 +284,82 @@ export const backupSchema = z.object({
     origin: 'typed',
     source: 'pellet 0.75 to 0.90, condensing gas 0.85 to 0.95; no source',
     help: 'Useful heat divided by bought energy over a year, on the basis of the price below.',
+  }),
+  heatPump: z
+    .object({
+      source: z
+        .enum(['outdoor air', 'ground'])
+        .default('outdoor air')
+        .meta({
+          label: 'Heat pump takes heat from',
+          help: 'The source fixes its coefficient of performance hour by hour.',
+        }),
+      groundC: quantity({
+        label: 'Ground source',
+        unit: '°C',
+        min: -8,
+        max: 20,
+        step: 0.5,
+        default: 3,
+        origin: 'common practice',
+        source: 'brine of a ground loop in winter; no source',
+        help: 'Mean temperature of the brine.',
+      }),
+      carnotShare: quantity({
+        label: 'Share of Carnot',
+        unit: '',
+        min: 0.2,
+        max: 0.6,
+        step: 0.01,
+        default: 0.45,
+        origin: 'common practice',
+        source: '0.40 to 0.50; no source',
+        help: 'COP = share × T_supply/(T_supply − T_source), in kelvin.',
+      }),
+    })
+    .prefault({}),
+});
+
+export const setbackSchema = z.object({
+  on: z
+    .boolean()
+    .default(false)
+    .meta({
+      label: 'Night setback',
+      help: 'A lower set point at night. The outdoor reset keeps its day curve.',
+    }),
+  nightC: quantity({
+    label: 'Room at night',
+    unit: '°C',
+    min: 8,
+    max: 26,
+    step: 0.5,
+    default: 17,
+    origin: 'common practice',
+    source: 'no source',
+    help: 'Set point of the room air during the night hours.',
+  }),
+  fromHour: quantity({
+    label: 'Night from',
+    unit: 'h',
+    min: 0,
+    max: 23,
+    step: 1,
+    default: 22,
+    origin: 'common practice',
+    source: 'no source',
+    help: 'Hour of the day, local standard time.',
+  }),
+  toHour: quantity({
+    label: 'Night until',
+    unit: 'h',
+    min: 0,
+    max: 23,
+    step: 1,
+    default: 5,
+    origin: 'common practice',
+    source: 'no source',
+    help: 'Hour of the day, local standard time; the same hour as “from” means no night.',
   }),
 });
 
@@ -336,6 +415,7 @@ export const houseSchema = z.object({
     source: 'demonstration',
     help: 'Set point of the room air.',
   }),
+  setback: setbackSchema.prefault({}),
   designOutdoorC: quantity({
     label: 'Design outdoor',
     unit: '°C',

@@ -32,8 +32,10 @@ export function assembleResult(
   );
   const months = Array.from({ length: 12 }, (_, month) => monthRow(tally, month, plan.pumpW));
   const sum = yearRow(months);
-  const efficiency = input.house.backup.seasonalEfficiency;
   const backupKwh = sum.backupHeatingKwh + sum.backupTapKwh;
+  const boughtKwh = tally.boughtJ / J_PER_KWH;
+  // heat that nobody gave is counted as bought at the mean efficiency of the reference house
+  const meanEfficiency = reference.boughtKwh > 0 ? reference.needKwh / reference.boughtKwh : 1;
   return {
     engineVersion: ENGINE_VERSION,
     layers: plan.layers,
@@ -48,15 +50,13 @@ export function assembleResult(
       fractions: solarFractions({
         solarKwh: sum.solarHeatingKwh + sum.solarTapKwh,
         backupKwh,
-        unmetKwh: sum.unmetKwh,
+        boughtKwh: boughtKwh + sum.unmetKwh / meanEfficiency,
         pumpKwh: sum.pumpKwh,
-        referenceNeedKwh: reference.needKwh + reference.unmetKwh,
-        backupEfficiency: efficiency,
-        referenceEfficiency: efficiency,
+        referenceBoughtKwh: reference.boughtKwh + reference.unmetKwh / meanEfficiency,
       }),
       referenceNeedKwh: reference.needKwh,
-      boughtKwh: backupKwh / efficiency,
-      referenceBoughtKwh: reference.needKwh / efficiency,
+      boughtKwh,
+      referenceBoughtKwh: reference.boughtKwh,
       roomMinC: least(columns.roomC),
       roomMaxC: largest(columns.roomC),
       floorMaxC: largest(columns.floorSurfaceC),

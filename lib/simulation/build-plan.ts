@@ -1,5 +1,6 @@
 import { linearLoss } from '@/lib/physics/collector';
 import { slabCapacity, supplyToSlabConductance } from '@/lib/physics/floor';
+import { heatPumpCop } from '@/lib/physics/heat-pump';
 import { mainsC, tappingShares } from '@/lib/physics/hot-water';
 import { beamModifier } from '@/lib/physics/incidence-angle';
 import { resetSupplyC } from '@/lib/physics/outdoor-reset';
@@ -72,6 +73,8 @@ export class PlanBuilder {
   private readonly supplies = new Memo<Float64Array>();
   private readonly taps = new Memo<{ tapKgPerS: Float64Array; mainsC: Float64Array }>();
   private readonly radiators = new Memo<Float64Array>();
+  private readonly roomSets = new Memo<Float64Array>();
+  private readonly efficiencies = new Memo<Pick<PlanColumns, 'heatingEfficiency' | 'tapEfficiency'>>();
   private readonly dryYears = new Memo<DryColumns>();
 
   private siteOf(weather: WeatherYear): { site: SiteCache; id: number } {
@@ -198,7 +201,7 @@ export class PlanBuilder {
 
   private houseColumns(
     input: SimulationInput,
-  ): Pick<PlanColumns, 'windowSunW' | 'supplySetC' | 'tapKgPerS' | 'mainsC'> {
+  ): Omit<PlanColumns, 'outdoorC' | 'planeWm2' | 'mounted' | 'absorbedWm2' | 'a1'> {
     const { house, design, numerics, weather } = input;
     const { site, id } = this.siteOf(weather);
     const windowSunW = this.windows.get(JSON.stringify([id, house.windows, numerics.skyModel]), () =>
@@ -218,7 +221,14 @@ export class PlanBuilder {
     );
     const south = weather.latitudeDeg < 0;
     const taps = this.taps.get(JSON.stringify([south, house.hotWater]), () => tapColumns(house, south));
-    return { windowSunW, supplySetC, ...taps };
+    const roomSetC = this.roomSets.get(JSON.stringify([house.roomSetC, house.setback]), () =>
+      roomSetColumn(house),
+    );
+    const efficiency = this.efficiencies.get(
+      JSON.stringify([id, house.backup, house.hotWater.setC, curve]),
+      () => efficiencyColumns(house, site.outdoorC, supplySetC),
+    );
+    return { windowSunW, supplySetC, roomSetC, ...efficiency, ...taps };
   }
 
   private housePlan(house: House, design: Design) {
@@ -298,6 +308,36 @@ function tapColumns(house: House, south: boolean): { tapKgPerS: Float64Array; ma
     mains[h] = mainsC(mainsMeanC, mainsAmplitudeK, day + 1, south);
   }
   return { tapKgPerS, mainsC: mains };
+}
+
+function roomSetColumn(house: House): Float64Array {
+  const { on, nightC, fromHour, toHour } = house.setback;
+  const column = new Float64Array(HOURS_PER_YEAR).fill(house.roomSetC);
+  if (!on) return column;
+  for (let h = 0; h < HOURS_PER_YEAR; h++) {
+    const hour = h % HOURS_PER_DAY;
+    const night = fromHour <= toHour ? hour >= fromHour && hour < toHour : hour >= fromHour || hour < toHour;
+    if (night) column[h] = Math.min(house.roomSetC, nightC);
+  }
+  return column;
+}
+
+/** Useful heat per bought energy by hour: a boiler's seasonal efficiency, or the heat pump at its two temperatures. */
+function efficiencyColumns(
+  house: House,
+  outdoorC: Float64Array,
+  supplySetC: Float64Array,
+): Pick<PlanColumns, 'heatingEfficiency' | 'tapEfficiency'> {
+  const { fuel, seasonalEfficiency, heatPump } = house.backup;
+  if (fuel !== 'heat pump') {
+    const constant = new Float64Array(HOURS_PER_YEAR).fill(seasonalEfficiency);
+    return { heatingEfficiency: constant, tapEfficiency: constant };
+  }
+  const sourceC = (h: number) => (heatPump.source === 'ground' ? heatPump.groundC : outdoorC[h]!);
+  return {
+    heatingEfficiency: supplySetC.map((supplyC, h) => heatPumpCop(sourceC(h), supplyC, heatPump.carnotShare)),
+    tapEfficiency: outdoorC.map((_, h) => heatPumpCop(sourceC(h), house.hotWater.setC, heatPump.carnotShare)),
+  };
 }
 
 function mountedHours(months: readonly boolean[]): Uint8Array {

@@ -196,12 +196,29 @@ export interface HotWater {
   exchangerEffectiveness: number;
 }
 
-export type Fuel = 'pellets' | 'wood' | 'gas' | 'oil' | 'electric';
+export type Fuel = 'pellets' | 'wood' | 'gas' | 'oil' | 'electric' | 'heat pump';
 
 export interface Backup {
   fuel: Fuel;
   ratedW: number;
+  /** useful heat / bought energy over a year; not used by a heat pump [-] */
   seasonalEfficiency: number;
+  heatPump: {
+    source: 'outdoor air' | 'ground';
+    /** temperature of a ground source [°C] */
+    groundC: number;
+    /** share of Carnot's coefficient of performance [-] */
+    carnotShare: number;
+  };
+}
+
+/** Lower set point at night. */
+export interface Setback {
+  on: boolean;
+  nightC: number;
+  /** hours of the day, local standard time; the night may pass midnight */
+  fromHour: number;
+  toHour: number;
 }
 
 export interface House {
@@ -212,6 +229,7 @@ export interface House {
   windows: readonly WindowGain[];
   capacityClass: CapacityClass;
   roomSetC: number;
+  setback: Setback;
   designOutdoorC: number;
   internalGainsW: number;
   /** ventilate four-fold above 25 °C */

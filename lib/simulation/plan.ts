@@ -19,6 +19,11 @@ export interface PlanColumns {
   mounted: Uint8Array;
   /** sun through the windows [W] */
   windowSunW: Float64Array;
+  /** set point of the room air [°C] */
+  roomSetC: Float64Array;
+  /** useful heat / bought energy of the backup for rooms and for taps [-] */
+  heatingEfficiency: Float64Array;
+  tapEfficiency: Float64Array;
   /** set supply of the emitter loop [°C] */
   supplySetC: Float64Array;
   /** tapped water at the tap's set temperature [kg/s] */
@@ -55,6 +60,7 @@ export interface Plan {
   ventilationWPerK: number;
   windowOpening: boolean;
   internalW: number;
+  /** day set point, the start of the first year [°C] */
   roomSetC: number;
   /** static loss of the house, for the size of unmet heat [W/K] */
   staticLossWPerK: number;

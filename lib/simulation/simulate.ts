@@ -21,6 +21,7 @@ export type YearOutcome =
 export interface ReferenceNeed {
   needKwh: number;
   unmetKwh: number;
+  boughtKwh: number;
 }
 
 const MESSAGES: Record<Exclude<YearStatus, 'done'>, string> = {

@@ -87,6 +87,8 @@ export class Tally {
   pipeLossJ = 0;
   storeLossJ = 0;
   backupJ = 0;
+  /** energy bought for the backup */
+  boughtJ = 0;
   windowSunJ = 0;
   internalJ = 0;
   ventilationJ = 0;
@@ -118,6 +120,7 @@ export class Tally {
   /** Clears everything for a new year and notes the heat stored at its start. */
   begin(state: YearState): void {
     this.monthJ.fill(0);
+    this.boughtJ = 0;
     this.arraySunJ = this.arrayLossJ = this.pipeLossJ = this.storeLossJ = this.backupJ = 0;
     this.windowSunJ = this.internalJ = this.ventilationJ = this.transmissionJ = this.windowRelossJ = 0;
     this.downwardJ = this.tapJ = this.dismountedJ = 0;
@@ -133,15 +136,15 @@ export class Tally {
     for (let i = 0; i < 4; i++) this.changeJ[i]! -= this.startJ[i]!;
   }
 
-  /** Heat given to rooms and taps, and what was missing [kWh]. */
-  need(): { needKwh: number; unmetKwh: number } {
+  /** Heat given to rooms and taps, what was missing, and what was bought for it [kWh]. */
+  need(): { needKwh: number; unmetKwh: number; boughtKwh: number } {
     let need = 0;
     let unmet = 0;
     for (let month = 0; month < 12; month++) {
       need += monthSum(this.monthJ, month, 'heating') + monthSum(this.monthJ, month, 'tap');
       unmet += monthSum(this.monthJ, month, 'unmet');
     }
-    return { needKwh: need * KWH_PER_J, unmetKwh: unmet * KWH_PER_J };
+    return { needKwh: need * KWH_PER_J, unmetKwh: unmet * KWH_PER_J, boughtKwh: this.boughtJ * KWH_PER_J };
   }
 
   private noteStored(state: YearState, into: Float64Array): void {
@@ -221,6 +224,9 @@ export class Tally {
     m[row + 13]! += this.starts - this.hourStarts;
     m[row + 14]! += outdoorC * SECONDS_PER_HOUR;
 
+    this.boughtJ +=
+      (backupHeatingW / plan.columns.heatingEfficiency[h]! + backupTapW / plan.columns.tapEfficiency[h]!) *
+      SECONDS_PER_HOUR;
     this.backupJ += (backupHeatingW + backupTapW) * SECONDS_PER_HOUR;
     this.tapJ += (solarTapW + backupTapW) * SECONDS_PER_HOUR;
     this.storeLossJ += hour[HOUR.STORE_LOSS]! * SECONDS_PER_HOUR;

@@ -85,7 +85,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
   const stepsPerHour = plan.stepsPerHour;
   const stepS = SECONDS_PER_HOUR / stepsPerHour;
   const columns = plan.columns;
-  const { theta, roomSetC, ratedW, hasArray, storeLimitC, loopKgPerS, floorWPerK } = plan;
+  const { theta, ratedW, hasArray, storeLimitC, loopKgPerS, floorWPerK } = plan;
   const floorShareUp = 1 - plan.floorDownward;
   const loopWPerK = loopKgPerS * CP;
   const hasFloor = floorWPerK > 0;
@@ -100,6 +100,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
 
   for (let h = 0; h < HOURS_PER_YEAR; h++) {
     const outdoorC = columns.outdoorC[h]!;
+    const roomSetC = columns.roomSetC[h]!;
     const windowSunW = columns.windowSunW[h]!;
     const internalW = plan.internalW;
     const absorbedWm2 = columns.absorbedWm2[h]!;
