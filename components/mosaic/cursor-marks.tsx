@@ -1,5 +1,5 @@
 import type { MosaicLayout } from './layout';
-import { DAYS_SHOWN } from './stones';
+import { DAYS_SHOWN, LOUPE_DAYS } from './stones';
 
 interface CursorMarksProps {
   layout: MosaicLayout;
@@ -7,11 +7,11 @@ interface CursorMarksProps {
   /** day column 0 to 364 */
   column: number;
   hour: number;
-  bracket?: readonly [number, number] | undefined;
+  bracketFrom?: number | undefined;
 }
 
 /** The frame round the stone under the cursor, its marks on both axes, and the bracket of the loupe. */
-export function CursorMarks({ layout, pixelRatio, column, hour, bracket }: CursorMarksProps) {
+export function CursorMarks({ layout, pixelRatio, column, hour, bracketFrom }: CursorMarksProps) {
   const at = Math.min(layout.columns - 1, Math.floor((column / DAYS_SHOWN) * layout.columns));
   const left = layout.x[at]! / pixelRatio;
   const top = layout.y[hour]! / pixelRatio;
@@ -40,10 +40,10 @@ export function CursorMarks({ layout, pixelRatio, column, hour, bracket }: Curso
       >
         <path d="m-7-5v10l6-5z" className="fill-ink" />
       </svg>
-      {bracket && (
+      {bracketFrom !== undefined && (
         <span
           className="absolute top-full mt-0.5 h-1.5 border border-t-0 border-ink"
-          style={{ left: share(bracket[0]), width: share(bracket[1] - bracket[0]) }}
+          style={{ left: share(bracketFrom), width: share(LOUPE_DAYS) }}
         />
       )}
     </div>

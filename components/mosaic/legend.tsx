@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import type { ReactNode } from 'react';
 import type { YearResult } from '@/lib/simulation/results';
 import { formatFixed, formatTyped, withUnit } from '@/lib/units/display';
@@ -67,7 +68,13 @@ function bandName(edges: readonly number[], band: number): string {
 }
 
 /** What the stones mean, each with its cut and its hours of the year. */
-export function Legend({ reading, result }: { reading: ReadingId; result: YearResult | undefined }) {
+export const Legend = memo(function Legend({
+  reading,
+  result,
+}: {
+  reading: ReadingId;
+  result: YearResult | undefined;
+}) {
   const bands = BAND_READINGS.find((one) => one.id === reading);
   const rows = bands ? bandRows(bands, result) : carrierRows(result);
   const noUnmet = !bands && result && !result.year.carrierHours[NOT_MET];
@@ -92,7 +99,7 @@ export function Legend({ reading, result }: { reading: ReadingId; result: YearRe
       </p>
     </div>
   );
-}
+});
 
 /** The legend as one line of words under a picture. */
 export function LegendLine() {

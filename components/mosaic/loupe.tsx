@@ -1,15 +1,14 @@
 'use client';
 
-import { useCallback, useState } from 'react';
+import { memo, useCallback, useState } from 'react';
 import type { AnswerFeed } from '@/components/study/answer-slot';
 import { HOURS_PER_DAY } from '@/lib/units/constants';
 import { dayName } from './calendar';
 import type { MosaicLayout } from './layout';
 import { StonesCanvas } from './stones-canvas';
-import { DAYS_SHOWN, columnOfDay, dayOfColumn } from './stones';
+import { DAYS_SHOWN, LOUPE_DAYS, columnOfDay, dayOfColumn } from './stones';
 import type { ReadingId } from './stones';
 
-export const LOUPE_DAYS = 15;
 const STONE_PX = 12;
 
 /** First column of the loupe round a day: the day in the middle, at the ends of the picture aside. */
@@ -30,7 +29,7 @@ interface LoupeProps {
 }
 
 /** The fifteen days round the cursor, with stones large enough for their full cut. A picture: the mosaic has the keys. */
-export function Loupe({ feed, reading, firstDay, hour, onMove }: LoupeProps) {
+export const Loupe = memo(function Loupe({ feed, reading, firstDay, hour, onMove }: LoupeProps) {
   const [grid, setGrid] = useState<{ layout: MosaicLayout; pixelRatio: number }>();
   const onLayout = useCallback(
     (layout: MosaicLayout, pixelRatio: number) => setGrid({ layout, pixelRatio }),
@@ -92,4 +91,4 @@ export function Loupe({ feed, reading, firstDay, hour, onMove }: LoupeProps) {
       </p>
     </div>
   );
-}
+});

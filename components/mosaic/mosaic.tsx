@@ -1,7 +1,7 @@
 'use client';
 
-import { useCallback, useMemo, useState } from 'react';
-import type { KeyboardEvent, PointerEvent, ReactNode } from 'react';
+import { memo, useCallback, useMemo, useState } from 'react';
+import type { KeyboardEvent, PointerEvent } from 'react';
 import type { AnswerFeed } from '@/components/study/answer-slot';
 import { HOURS_PER_DAY } from '@/lib/units/constants';
 import { MONTHS, MONTH_FIRST_DAY, monthOrder, moveCursor } from './calendar';
@@ -29,19 +29,16 @@ interface MosaicProps {
   /** height of an hour where the year is laid in days [CSS px] */
   rowPx: number;
   cursor?: MosaicCursor | undefined;
-  /** days that a loupe shows, as columns of the picture */
-  bracket?: readonly [number, number] | undefined;
+  /** first of the columns that a loupe shows */
+  bracketFrom?: number | undefined;
   label: string;
-  /** under each month, in the order of the picture */
-  months?: readonly ReactNode[] | undefined;
-  monthsUnit?: string;
 }
 
 const HOUR_TICKS = [0, 6, 12, 18, 24];
 
 /** The year as a floor of stones: a column per day, midnight on top; on a phone a column per week. */
-export function Mosaic(props: MosaicProps) {
-  const { feed, reading, firstDay, site, rowPx, cursor, bracket, label, months, monthsUnit } = props;
+export const Mosaic = memo(function Mosaic(props: MosaicProps) {
+  const { feed, reading, firstDay, site, rowPx, cursor, bracketFrom, label } = props;
   const [grid, setGrid] = useState<{ layout: MosaicLayout; pixelRatio: number }>();
   const onLayout = useCallback(
     (layout: MosaicLayout, pixelRatio: number) => setGrid({ layout, pixelRatio }),
@@ -51,7 +48,6 @@ export function Mosaic(props: MosaicProps) {
     (cssWidth: number) => (yearColumns(cssWidth) === WEEKS_SHOWN ? cssWidth / WEEKS_SHOWN : rowPx),
     [rowPx],
   );
-  const weeks = grid?.layout.columns === WEEKS_SHOWN;
   const order = monthOrder(firstDay);
 
   function onPointer(event: PointerEvent<HTMLElement>) {
@@ -102,7 +98,7 @@ export function Mosaic(props: MosaicProps) {
             pixelRatio={grid.pixelRatio}
             column={columnOfDay(Math.floor(cursor.hour / HOURS_PER_DAY), firstDay)}
             hour={cursor.hour % HOURS_PER_DAY}
-            bracket={bracket}
+            bracketFrom={bracketFrom}
           />
         )}
         {cursor && (
@@ -111,26 +107,9 @@ export function Mosaic(props: MosaicProps) {
           </p>
         )}
       </div>
-      {months && (
-        <>
-          <span className="mt-3 pr-1 text-right text-note text-muted max-sm:hidden">{monthsUnit}</span>
-          <ol className={`relative mt-3 h-10 ${weeks ? 'hidden' : ''}`} aria-label="Month by month">
-            {order.map((month, place) => (
-              <li
-                key={month}
-                className="absolute border-l border-hair pl-1 text-note leading-4.5"
-                style={{ left: `${(columnOfDay(MONTH_FIRST_DAY[month]!, firstDay) / DAYS_SHOWN) * 100}%` }}
-              >
-                <span className="sr-only">{MONTHS[month]}: </span>
-                {months[place]}
-              </li>
-            ))}
-          </ol>
-        </>
-      )}
     </div>
   );
-}
+});
 
 function MonthNames({ order, firstDay }: { order: readonly number[]; firstDay: number }) {
   return (

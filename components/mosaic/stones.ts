@@ -110,6 +110,7 @@ export const DAYS_SHOWN = HOURS_PER_YEAR / HOURS_PER_DAY;
 /** 1 July, counted from 1 January = 0. */
 export const FIRST_OF_JULY = 181;
 export const WEEKS_SHOWN = 52;
+export const LOUPE_DAYS = 15;
 
 /** Day of the calendar year in a column of the picture. */
 export function dayOfColumn(column: number, firstDay: number): number {

@@ -17,11 +17,16 @@ export interface Heard {
   failure: string | undefined;
 }
 
+/** React hears at most this often while answers stream in; the listeners hear every frame [ms]. */
+const TELL_EVERY_MS = 60;
+
 /** The place of one design: its newest question, its newest answer, and whoever draws it once per frame. */
 export class AnswerSlot implements AnswerFeed {
   private asked: StudyQuestion | undefined;
   private heard: Heard = { answer: undefined, failure: undefined };
   private frame = 0;
+  private toldAt = 0;
+  private telling: ReturnType<typeof setTimeout> | undefined;
   private tell: (heard: Heard) => void = () => undefined;
   private readonly listeners = new Set<AnswerListener>();
   private readonly queue: LatestWins<StudyQuestion>;
@@ -67,7 +72,18 @@ export class AnswerSlot implements AnswerFeed {
       this.frame = 0;
       const { answer, failure } = this.heard;
       if (answer && failure === undefined) this.listeners.forEach((listener) => listener(answer));
-      this.tell(this.heard);
+      this.tellSoon();
     });
+  }
+
+  private tellSoon() {
+    this.telling ??= setTimeout(
+      () => {
+        this.telling = undefined;
+        this.toldAt = performance.now();
+        this.tell(this.heard);
+      },
+      Math.max(0, this.toldAt + TELL_EVERY_MS - performance.now()),
+    );
   }
 }

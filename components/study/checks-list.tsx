@@ -1,9 +1,14 @@
+import { memo } from 'react';
 import type { Finding } from '@/lib/checks/findings';
 
 const WORDS: Record<Finding['severity'], string> = { stop: 'Stop.', caution: 'Caution.', note: 'Note.' };
 
 /** What the engineering checks found, the gravest first: a mark, the word, the sentence. */
-export function ChecksList({ findings }: { findings: readonly Finding[] | undefined }) {
+export const ChecksList = memo(function ChecksList({
+  findings,
+}: {
+  findings: readonly Finding[] | undefined;
+}) {
   return (
     <section aria-labelledby="checks-heading" className="pt-1 rule-ink">
       <h2 id="checks-heading" className="sr-only">
@@ -26,7 +31,7 @@ export function ChecksList({ findings }: { findings: readonly Finding[] | undefi
       </p>
     </section>
   );
-}
+});
 
 export function CheckMark({ severity }: { severity: Finding['severity'] }) {
   return (

@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import type { StudyAnswer } from '@/lib/study/study-question';
 import { NO_VALUE, formatFixed, withUnit } from '@/lib/units/display';
 import { celsius, hourName, hourSentence, power } from './hour-words';
@@ -40,7 +41,13 @@ function soundings(answer: StudyAnswer, hour: number): Sounding[] {
 }
 
 /** The hour under the cursor in figures; the drawing of it takes this room later. */
-export function HourPanel({ answer, hour }: { answer: StudyAnswer | undefined; hour: number }) {
+export const HourPanel = memo(function HourPanel({
+  answer,
+  hour,
+}: {
+  answer: StudyAnswer | undefined;
+  hour: number;
+}) {
   return (
     <section aria-labelledby="hour-heading">
       <h2 id="hour-heading">{hourName(hour)}</h2>
@@ -59,4 +66,4 @@ export function HourPanel({ answer, hour }: { answer: StudyAnswer | undefined; h
       </dl>
     </section>
   );
-}
+});

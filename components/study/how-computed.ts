@@ -30,10 +30,17 @@ export function explain(
     const { figure, unit } = fuelAmount(boughtKwh, house, prices);
     return withUnit(figure, unit);
   };
-  const efficiency = {
-    name: 'seasonal efficiency of the backup',
-    value: formatTyped(house.backup.seasonalEfficiency),
-  };
+  const backupKwh = year.backupHeatingKwh + year.backupTapKwh;
+  const efficiency =
+    house.backup.fuel === 'heat pump'
+      ? {
+          name: 'heat for each kilowatt-hour drawn, over the year',
+          value: formatSignificant(backupKwh / year.boughtKwh, 2),
+        }
+      : {
+          name: 'seasonal efficiency of the backup',
+          value: formatTyped(house.backup.seasonalEfficiency),
+        };
   const perKg = { name: 'energy in the fuel', value: withUnit(formatTyped(prices.fuelKwhPerKg), 'kWh/kg') };
   switch (number) {
     case 'area':
@@ -82,7 +89,7 @@ export function explain(
       return {
         title: 'Fuel still bought',
         value: fuel(year.boughtKwh),
-        equation: 'backup heat to heating and hot water, divided by the seasonal efficiency',
+        equation: 'backup heat to heating and hot water, divided by the efficiency of the backup',
         inputs: [
           { name: 'backup to the heating', value: kwh(year.backupHeatingKwh) },
           { name: 'backup to hot water', value: kwh(year.backupTapKwh) },
@@ -97,7 +104,7 @@ export function explain(
         title: 'Fuel without the sun',
         value: fuel(year.referenceBoughtKwh),
         equation:
-          'need of the same house in the same year without array and store, divided by the same efficiency',
+          'need of the same house in the same year without array and store, divided by the efficiency of the backup',
         inputs: [{ name: 'need without the sun', value: kwh(year.referenceNeedKwh) }, efficiency, perKg],
         source: 'A run of its own with the same house and weather.',
       };

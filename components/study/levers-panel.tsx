@@ -6,7 +6,8 @@ import type { DesignRecord } from '@/lib/schemas/design';
 import type { StudyAnswer, StudyQuestion } from '@/lib/study/study-question';
 import { CoverLever } from './cover-lever';
 import { LeverRow } from './lever-row';
-import { LEVERS, coverChoices, leverOf, withCollector, withMonths } from './levers';
+import { coverChoices, leverOf, withCollector, withMonths } from './levers';
+import type { LeverId } from './levers';
 import { MonthsLever } from './months-lever';
 import { traceRange, useTraces } from './use-traces';
 
@@ -29,7 +30,7 @@ export function LeversPanel(props: LeversPanelProps) {
   const nowKwh = year && year.backupHeatingKwh + year.backupTapKwh;
   const traceOf = (id: keyof typeof traces) =>
     nowKwh === undefined ? undefined : { points: traces[id], range: traceRange(traces, nowKwh), nowKwh };
-  const row = (id: (typeof LEVERS)[number]['id']) => {
+  const row = (id: LeverId) => {
     const lever = leverOf(id);
     return (
       <LeverRow

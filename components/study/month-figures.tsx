@@ -1,10 +1,32 @@
-import type { EnergyRow } from '@/lib/simulation/results';
+import { MONTHS, MONTH_FIRST_DAY, monthOrder } from '@/components/mosaic/calendar';
+import { DAYS_SHOWN, columnOfDay } from '@/components/mosaic/stones';
+import type { EnergyRow, YearResult } from '@/lib/simulation/results';
 import { formatFixed, formatSignificant } from '@/lib/units/display';
 
 const figure = (kwh: number) => (kwh < 100 ? formatFixed(kwh) : formatSignificant(kwh, 3));
 
-/** The sun's part of a month's need, under the mosaic: "291 of 299". */
-export function MonthFigure({ month }: { month: EnergyRow }) {
+/** The sun's part of each month's need, under the mosaic and in step with it: "291 of 299". */
+export function MonthFigures({ result, firstDay }: { result: YearResult | undefined; firstDay: number }) {
+  return (
+    <div className="mt-3 grid min-h-10 grid-cols-[2rem_minmax(0,1fr)] text-note leading-4.5 max-md:hidden">
+      <span className="pr-1 text-right text-muted">kWh</span>
+      <ol className="relative" aria-label="Sun’s part of each month’s need">
+        {monthOrder(firstDay).map((month) => (
+          <li
+            key={month}
+            className="absolute border-l border-hair pl-1"
+            style={{ left: `${(columnOfDay(MONTH_FIRST_DAY[month]!, firstDay) / DAYS_SHOWN) * 100}%` }}
+          >
+            <span className="sr-only">{MONTHS[month]}: </span>
+            {result && <MonthFigure month={result.months[month]!} />}
+          </li>
+        ))}
+      </ol>
+    </div>
+  );
+}
+
+function MonthFigure({ month }: { month: EnergyRow }) {
   const sun = month.solarHeatingKwh + month.solarTapKwh;
   const need = sun + month.backupHeatingKwh + month.backupTapKwh + month.unmetKwh;
   return (

@@ -1,10 +1,9 @@
 'use client';
 
-import { useMemo, useState } from 'react';
+import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
 import type { ReactNode } from 'react';
-import { monthOrder } from '@/components/mosaic/calendar';
 import { Legend } from '@/components/mosaic/legend';
-import { LOUPE_DAYS, Loupe, loupeStart } from '@/components/mosaic/loupe';
+import { Loupe, loupeStart } from '@/components/mosaic/loupe';
 import { Mosaic } from '@/components/mosaic/mosaic';
 import { BAND_READINGS, FIRST_OF_JULY } from '@/components/mosaic/stones';
 import type { ReadingId } from '@/components/mosaic/stones';
@@ -15,7 +14,7 @@ import { HOURS_PER_DAY } from '@/lib/units/constants';
 import type { AnswerFeed } from './answer-slot';
 import { HourPanel } from './hour-panel';
 import { spokenHour } from './hour-words';
-import { MonthFigure } from './month-figures';
+import { MonthFigures } from './month-figures';
 import { YearTable } from './year-table';
 
 /** 1 February to 15 March: late winter, when sun, store and backup all have their part. */
@@ -55,26 +54,28 @@ export function StudyPicture({
   firstDay,
   onFirstDay,
   levers,
-  months: monthsSection,
+  months,
 }: StudyPictureProps) {
   const [reading, setReading] = useState<ReadingId>('carrier');
   const [chosenHour, setHour] = useState<number>();
   if (chosenHour === undefined && answer) setHour(tellingHour(answer));
   const hour = chosenHour ?? TELLING_DAYS[0] * HOURS_PER_DAY + 12;
-  const [moved, setMoved] = useState('');
+  const [spoken, setSpoken] = useState('');
   const [asTable, setAsTable] = useState(false);
-  const months = useMemo(
-    () =>
-      answer &&
-      monthOrder(firstDay).map((month) => <MonthFigure key={month} month={answer.result.months[month]!} />),
-    [answer, firstDay],
-  );
-  const start = loupeStart(Math.floor(hour / HOURS_PER_DAY), firstDay);
 
-  function onMove(next: number) {
+  const latest = useRef<StudyAnswer>(undefined);
+  useEffect(
+    () =>
+      feed.listen((heard) => {
+        latest.current = heard;
+      }),
+    [feed],
+  );
+  const onMove = useCallback((next: number) => {
     setHour(next);
-    if (answer) setMoved(spokenHour(answer, next));
-  }
+    if (latest.current) setSpoken(spokenHour(latest.current, next));
+  }, []);
+  const cursor = useMemo(() => ({ hour, spoken, onMove }), [hour, spoken, onMove]);
 
   return (
     <>
@@ -113,11 +114,10 @@ export function StudyPicture({
             site={site}
             rowPx={ROW_PX}
             label="Mosaic of the year, one stone per hour"
-            cursor={{ hour, spoken: moved, onMove }}
-            bracket={[start, start + LOUPE_DAYS]}
-            months={months ?? []}
-            monthsUnit="kWh"
+            cursor={cursor}
+            bracketFrom={loupeStart(Math.floor(hour / HOURS_PER_DAY), firstDay)}
           />
+          <MonthFigures result={answer?.result} firstDay={firstDay} />
           {asTable && answer && (
             <div className="mt-4">
               <YearTable result={answer.result} firstDay={firstDay} />
@@ -139,7 +139,7 @@ export function StudyPicture({
         <div className="sm:col-span-2 lg:col-span-1 lg:col-start-3 lg:row-span-2 lg:row-start-1">
           {levers}
         </div>
-        <div className="sm:col-span-2">{monthsSection}</div>
+        <div className="sm:col-span-2">{months}</div>
       </div>
     </>
   );

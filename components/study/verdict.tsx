@@ -1,5 +1,6 @@
 'use client';
 
+import { memo } from 'react';
 import { Popover } from 'radix-ui';
 import type { HouseRecord } from '@/lib/schemas/house';
 import type { Prices } from '@/lib/schemas/prices';
@@ -26,7 +27,7 @@ interface VerdictProps {
 }
 
 /** One plain sentence, live while levers move; each number opens how it was computed. */
-export function Verdict({ answer, house, prices }: VerdictProps) {
+export const Verdict = memo(function Verdict({ answer, house, prices }: VerdictProps) {
   const parts = answer ? verdictParts(answer, house, prices) : [];
   const spoken = useSettled(verdictText(parts), 700);
   return (
@@ -55,7 +56,7 @@ export function Verdict({ answer, house, prices }: VerdictProps) {
       </p>
     </>
   );
-}
+});
 
 function VerdictButton(props: { text: string; course: string; explanation: Explanation }) {
   const { text, course, explanation } = props;
