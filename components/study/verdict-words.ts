@@ -30,6 +30,7 @@ const FUEL_WORDS: Record<HouseRecord['backup']['fuel'], { verb: string; noun: st
   wood: { verb: 'the boiler burns', noun: 'of wood', byWeight: true },
   oil: { verb: 'the boiler burns', noun: 'of oil', byWeight: true },
   gas: { verb: 'the boiler burns', noun: 'of gas', byWeight: false },
+  'heat pump': { verb: 'the heat pump draws', noun: 'of electricity', byWeight: false },
   electric: { verb: 'the heater draws', noun: 'of electricity', byWeight: false },
 };
 
