@@ -1,7 +1,25 @@
-import { toRadians } from '@/lib/units/constants';
+import { toDegrees, toRadians } from '@/lib/units/constants';
 
 const TABLE_STEP_DEG = 10;
 const HEMISPHERE_STEPS = 1800;
+const PAIR_STEPS = 90;
+
+/** How ribs, webs or tubes of a collector lie when it is mounted. */
+export const RIBS = ['along the slope', 'across the slope'] as const;
+
+/** How the acceptance of beam irradiance falls with its angle. */
+export type IncidenceModifier =
+  /** by the curve's own b0 */
+  | { kind: 'b0' }
+  /** ten values at 0, 10 … 90° [-] */
+  | { kind: 'table'; values: readonly number[] }
+  /** ten values each, along and across ribs, webs or tubes [-] */
+  | {
+      kind: 'pair';
+      longitudinal: readonly number[];
+      transversal: readonly number[];
+      ribs: (typeof RIBS)[number];
+    };
 
 /**
  * Incidence-angle modifier of beam irradiance: K = 1 − b0 (1/cos θ − 1), not below 0.
@@ -55,6 +73,57 @@ export function diffuseModifierFromTable(table: readonly number[]): number {
     const weight = Math.sin(2 * toRadians(incidenceDeg));
     weighted += weight * modifierFromTable(table, incidenceDeg);
     weights += weight;
+  }
+  return weighted / weights;
+}
+
+/**
+ * Modifier of a ribbed collector from its two tables: K = K_L(θL) K_T(θT).
+ * @param pair tables from 0° to 90° in steps of 10° [-] 0–1.5, and how the ribs lie
+ * @param upSlopeDeg incidence angle in the plane up the slope [°] 0–90
+ * @param acrossDeg incidence angle in the plane across the slope [°] 0–90
+ * @returns modifier [-] from 0
+ * @remarks the longitudinal plane holds the ribs; the product is exact only in the two planes themselves
+ * @see ISO 9806:2017, incidence-angle modifier of collectors with two axes (from memory)
+ */
+export function modifierFromPair(
+  pair: Extract<IncidenceModifier, { kind: 'pair' }>,
+  upSlopeDeg: number,
+  acrossDeg: number,
+): number {
+  const upright = pair.ribs === 'along the slope';
+  const longitudinalDeg = upright ? upSlopeDeg : acrossDeg;
+  const transversalDeg = upright ? acrossDeg : upSlopeDeg;
+  return (
+    modifierFromTable(pair.longitudinal, longitudinalDeg) *
+    modifierFromTable(pair.transversal, transversalDeg)
+  );
+}
+
+/**
+ * Diffuse modifier of an isotropic hemisphere from the two tables of a ribbed collector: mean of K_L K_T over the
+ * hemisphere, weighted with cos θ.
+ * @param longitudinal ten modifiers from 0° to 90° in steps of 10° [-] 0–1.5
+ * @param transversal likewise [-] 0–1.5
+ * @returns diffuse modifier Kd [-]
+ * @see ISO 9806:2017 Annex B (from memory), with the product of both tables
+ */
+export function diffuseModifierFromPair(
+  longitudinal: readonly number[],
+  transversal: readonly number[],
+): number {
+  let weighted = 0;
+  let weights = 0;
+  for (let i = 0; i < PAIR_STEPS; i++) {
+    const incidence = toRadians(((i + 0.5) * 90) / PAIR_STEPS);
+    const weight = Math.sin(2 * incidence);
+    for (let j = 0; j < PAIR_STEPS; j++) {
+      const turn = toRadians(((j + 0.5) * 90) / PAIR_STEPS);
+      const along = toDegrees(Math.atan(Math.tan(incidence) * Math.cos(turn)));
+      const across = toDegrees(Math.atan(Math.tan(incidence) * Math.sin(turn)));
+      weighted += weight * modifierFromTable(longitudinal, along) * modifierFromTable(transversal, across);
+      weights += weight;
+    }
   }
   return weighted / weights;
 }
