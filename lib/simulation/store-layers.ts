@@ -108,11 +108,23 @@ export class StoreLayers {
     return i;
   }
 
-  /** Longest stable sub-step of the given flows [s]: θ · layer mass / largest flow. */
+  /**
+   * Longest sub-step of the given flows [s]: θ · layer mass / largest flow, and no longer than the top needs to come
+   * down to the heating return: beyond that a cold second layer would give heat uphill.
+   */
   stepLimitS(theta: number): number {
     const f = this.flows;
-    const largest = Math.max(f.chargeKgPerS, f.heatingKgPerS + f.tapKgPerS);
-    return largest > 0 ? (theta * this.layerKg) / largest : Infinity;
+    const drawn = f.heatingKgPerS + f.tapKgPerS;
+    const largest = Math.max(f.chargeKgPerS, drawn);
+    let limit = largest > 0 ? (theta * this.layerKg) / largest : Infinity;
+    if (f.heatingKgPerS > 0 && this.count > 1) {
+      const top = this.t[0]!;
+      const below = this.t[1]!;
+      if (below < f.returnC) {
+        limit = Math.min(limit, (this.layerKg * (top - f.returnC)) / (drawn * (top - below)));
+      }
+    }
+    return limit;
   }
 
   /** Net flows at the interfaces, fixed for both stages of a sub-step. */

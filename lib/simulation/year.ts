@@ -227,6 +227,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
         flows.heatingKgPerS = heatingKgPerS;
         flows.tapKgPerS = preheatKgPerS;
         flows.chargeKgPerS = loop.full ? flowKgPerS : 0;
+        flows.returnC = returnC;
         let dt = Math.min(rest, store.stepLimitS(theta));
 
         if (loop.full) {
@@ -252,7 +253,6 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
 
         store.dtS = dt;
         loop.dtS = dt;
-        flows.returnC = returnC;
         flows.returnLevel = heatingKgPerS > 0 ? store.levelFor(returnC) : 0;
         if (loop.full) {
           loop.findCharge();
