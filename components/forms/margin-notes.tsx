@@ -49,8 +49,8 @@ export function MarginNotes() {
       <h3 className="pt-3 pb-2 text-ink rule-ink">How well a value is known</h3>
       <OriginLegend />
       <p className="mt-4">
-        A comma or a point may stand before the decimals. <kbd>Ctrl S</kbd> saves; in a table <kbd>Enter</kbd>{' '}
-        goes down a row.
+        A comma or a point may stand before the decimals. <kbd className="font-text font-strong">Ctrl S</kbd>{' '}
+        saves; in a table <kbd className="font-text font-strong">Enter</kbd> goes down a row.
       </p>
     </aside>
   );

@@ -1,6 +1,7 @@
 'use client';
 
 import Link from 'next/link';
+import { usePathname } from 'next/navigation';
 import type { ReactNode } from 'react';
 import { useFormContext, useFormState } from 'react-hook-form';
 import type { SaveState, Stored } from './use-saving';
@@ -31,6 +32,11 @@ function Standing<T>({
   return state.kind === 'saved' ? <>saved at {state.at}</> : <>as saved</>;
 }
 
+function SignInAgain() {
+  const here = usePathname();
+  return <Link href={`/sign-in?to=${encodeURIComponent(here)}`}>Sign in again</Link>;
+}
+
 function Trouble<T>(props: SaveBarProps<T>) {
   const { state } = props;
   if (state.kind === 'conflict')
@@ -51,7 +57,7 @@ function Trouble<T>(props: SaveBarProps<T>) {
     return (
       <p role="alert" className="border-l-2 border-hot pl-3">
         <strong className="text-hot-text">{state.refusal.message}</strong> What you typed is kept in this tab.{' '}
-        {state.refusal.code === 'signed out' && <Link href="/sign-in">Sign in again</Link>}
+        {state.refusal.code === 'signed out' && <SignInAgain />}
       </p>
     );
   if (state.kind === 'saved' && state.runRefusal)

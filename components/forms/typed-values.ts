@@ -12,7 +12,8 @@ export function typedNumber(value: number): string {
 
 /** A schema without its default, so that its kind can be told. */
 export function bare(schema: z.ZodType): z.ZodType {
-  return schema instanceof z.ZodDefault ? bare(schema.unwrap() as z.ZodType) : schema;
+  const wrapped = schema instanceof z.ZodDefault || schema instanceof z.ZodPrefault;
+  return wrapped ? bare(schema.unwrap() as z.ZodType) : schema;
 }
 
 type Shape = Readonly<Record<string, z.ZodType>>;
@@ -54,9 +55,13 @@ export function schemaAt(schema: z.ZodType, path: string): z.ZodType {
   return at;
 }
 
-/** A record as form text. Options of a union that are not chosen are filled with their defaults, ready to be chosen. */
-export function toTyped(schema: z.ZodType, value: unknown): Typed {
+/**
+ * A record as form text; a field that is younger than the record begins at its default. Options of a union that are
+ * not chosen are filled with their defaults, ready to be chosen.
+ */
+export function toTyped(schema: z.ZodType, stored: unknown): Typed {
   const here = bare(schema);
+  const value = stored === undefined ? schema.parse(undefined) : stored;
   if (typeof value === 'number') return typedNumber(value);
   const element = elementOf(here);
   if (element) return (value as unknown[]).map((row) => toTyped(element, row));
