@@ -119,5 +119,7 @@ export default defineConfig([
       ],
     },
   },
+  // Their purpose is to print.
+  { files: ['tests/bench/**/*.ts'], rules: { 'no-console': 'off' } },
   ...streets,
 ]);
