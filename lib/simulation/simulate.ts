@@ -1,3 +1,4 @@
+import { HouseNetwork } from '@/lib/physics/house-network';
 import type { WeatherYear } from '@/lib/weather/weather-year';
 import type { Design, House, Numerics } from './design';
 import { assembleResult } from './assemble-result';
@@ -15,7 +16,8 @@ export interface SimulationInput {
 }
 
 export type YearOutcome =
-  { ok: true; result: YearResult } | { ok: false; code: 'too stiff' | 'not finite'; message: string };
+  | { ok: true; result: YearResult }
+  | { ok: false; code: 'too stiff' | 'not finite' | 'shell and floor disagree'; message: string };
 
 /** Need of the house without sun and store, kept while house and supply stay as they are. */
 export interface ReferenceNeed {
@@ -68,15 +70,29 @@ export function createSimulator(): Simulator {
 
   return {
     run(input) {
+      const plan = builder.plan(input);
+      const refused = shellRefusal(plan);
+      if (refused) return refused;
       const need = reference(input);
       if (typeof need === 'string') return failure(need);
-      const plan = builder.plan(input);
       const tally = new Tally(plan.layers);
       tally.columns = createColumns(plan.layers);
       const { status, state } = runPlan(plan, tally);
       if (status !== 'done') return failure(status);
       return { ok: true, result: assembleResult(input, plan, state, tally, need, builder.dry(input)) };
     },
+  };
+}
+
+/** The network has no meaning where the opaque shell loses more than its inner surfaces take up (ISO 13790, formula 64). */
+function shellRefusal({ network }: Plan): YearOutcome | undefined {
+  const { hMs } = new HouseNetwork(network);
+  if (network.opaqueWPerK < hMs) return undefined;
+  const figures = `${network.opaqueWPerK.toFixed(0)} W/K`;
+  return {
+    ok: false,
+    code: 'shell and floor disagree',
+    message: `Walls, roof and ground lose ${figures}, more than the inner surfaces of ${network.floorAreaM2} m² of floor can give (${hMs.toFixed(0)} W/K). Check areas and U of the shell against the heated floor area.`,
   };
 }
 
