@@ -48,6 +48,7 @@ export const Mosaic = memo(function Mosaic(props: MosaicProps) {
     (cssWidth: number) => (yearColumns(cssWidth) === WEEKS_SHOWN ? cssWidth / WEEKS_SHOWN : rowPx),
     [rowPx],
   );
+  const weeks = grid?.layout.columns === WEEKS_SHOWN;
   const order = monthOrder(firstDay);
 
   function onPointer(event: PointerEvent<HTMLElement>) {
@@ -107,6 +108,11 @@ export const Mosaic = memo(function Mosaic(props: MosaicProps) {
           </p>
         )}
       </div>
+      {weeks && (
+        <p className="col-span-2 mt-2 text-note text-muted">
+          One stone: the same hour of seven days, laid by the majority; an hour too hot always shows.
+        </p>
+      )}
     </div>
   );
 });
