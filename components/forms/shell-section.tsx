@@ -45,7 +45,7 @@ export function ShellSection() {
         derived={{
           head: (
             <>
-              Loss<span className="block">W/K</span>
+              Loss <span className="md:block">W/K</span>
             </>
           ),
           cell: (index) => {
