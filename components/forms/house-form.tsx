@@ -113,7 +113,9 @@ export function HouseForm({ projectId, stored, currency, save, frieze }: HouseFo
           <Field path="hotWater.litresPerDay" />
           <Field path="hotWater.setC" />
           <Field path="hotWater.profile" />
+          <Field path="hotWater.exchanger" />
           <Field path="hotWater.exchangerEffectiveness" />
+          <Field path="hotWater.coilWPerK" />
           <Field path="hotWater.mainsMeanC" />
           <Field path="hotWater.mainsAmplitudeK" />
         </FieldRow>

@@ -16,11 +16,12 @@ import type { SaveAnswer, Stored } from './use-saving';
 const partSchema = designSchema.pick({
   name: true,
   array: true,
+  loop: true,
   controller: true,
   store: true,
   supply: true,
 });
-type LoopAndStore = Pick<DesignRecord, 'name' | 'array' | 'controller' | 'store' | 'supply'>;
+type LoopAndStore = Pick<DesignRecord, 'name' | 'array' | 'loop' | 'controller' | 'store' | 'supply'>;
 
 const CONTENTS: readonly ContentsEntry[] = [
   {
@@ -46,6 +47,18 @@ const CONTENTS: readonly ContentsEntry[] = [
       'array.pipeLossWPerMK',
       'array.pipeCapacityJPerMK',
       'array.pumpEfficiency',
+      'loop.pump',
+    ],
+  },
+  {
+    id: 'layout',
+    title: 'Layout',
+    fields: [
+      'loop.layout',
+      'loop.exchangerEffectiveness',
+      'loop.vesselReserveL',
+      'loop.vesselLossWPerK',
+      'loop.slabRoomLimitC',
     ],
   },
   { id: 'controller', title: 'Controller', fields: ['controller'] },
@@ -120,11 +133,24 @@ export function LoopAndStoreForm({ designId, stored, currency, save, frieze }: L
           <Field path="array.pipeCapacityJPerMK" />
           <Field path="array.flowKgPerSM2" />
           <Field path="array.pumpEfficiency" />
+          <Field path="loop.pump.kind" />
+          <Field path="loop.pump.shutOffHeadM" />
+          <Field path="loop.pump.greatestFlowLPerS" />
+          <Field path="loop.pump.returnPipe" />
         </FieldRow>
         <Caution>
           Pumps and controllers near water belong on a protected circuit: electrical work follows your local
           code and a licensed electrician.
         </Caution>
+      </FormSection>
+      <FormSection id="layout" title="Layout">
+        <FieldRow>
+          <Field path="loop.layout" />
+          <Field path="loop.exchangerEffectiveness" />
+          <Field path="loop.vesselReserveL" />
+          <Field path="loop.vesselLossWPerK" />
+          <Field path="loop.slabRoomLimitC" />
+        </FieldRow>
       </FormSection>
       <FormSection id="controller" title="Controller">
         <FieldRow>

@@ -1,5 +1,6 @@
 import { FLOOR_LIMITS } from '@/lib/physics/floor';
 import type { PartDryness } from '@/lib/simulation/results';
+import { pumpDuty } from '@/lib/simulation/build-plan';
 import { emitterLoop, houseHeat } from '@/lib/simulation/house-heat';
 import { formatFixed, formatShare, formatSignificant, withUnit } from '@/lib/units/display';
 import { DAYS_IN_MONTH, HOURS_PER_DAY, SECONDS_PER_HOUR } from '@/lib/units/constants';
@@ -21,6 +22,11 @@ export interface Rule {
 const MONTHS = [
   'January', 'February', 'March', 'April', 'May', 'June', 'July', 'August', 'September', 'October', 'November', 'December',
 ] as const; // prettier-ignore
+
+/** Head beyond lift and friction that fills an array with certainty [m]. */
+const FILL_RESERVE_M = 1.2;
+/** Absorbers that hold this much water are soft mats, not metal plates [L/m²]. */
+const SOFT_ABSORBER_L_PER_M2 = 3;
 
 const celsius = (value: number) => withUnit(formatFixed(value), '°C');
 const hoursText = (hours: number) => (hours === 1 ? 'one hour' : `${formatFixed(hours)} hours`);
@@ -197,6 +203,35 @@ export const RULES: readonly Rule[] = [
           `The array looks ${withUnit(formatFixed(off), '°')} away from the equator; its winter sun is weak.`,
       );
     },
+  },
+  {
+    id: 'H3',
+    severity: 'stop',
+    where: 'array',
+    source: 'common practice, no source: lift to the top of the array + 1.2 m + friction',
+    judge: ({ design }) => {
+      const { pump } = design.loop;
+      const neededM = pumpDuty(design).fillHeadM + FILL_RESERVE_M;
+      return when(
+        design.array.areaM2 > 0 && pump.kind === 'curve' && pump.shutOffHeadM < neededM,
+        () =>
+          `The pump lifts ${withUnit(formatFixed(pump.shutOffHeadM, 1), 'm')} at most; filling the array asks for ${withUnit(formatFixed(neededM, 1), 'm')}. It will not start.`,
+      );
+    },
+  },
+  {
+    id: 'H6',
+    severity: 'stop',
+    where: 'array',
+    source: 'common practice, no source: soft absorbers bear no vacuum',
+    judge: ({ design }) =>
+      when(
+        design.array.areaM2 > 0 &&
+          design.loop.pump.returnPipe === 'siphon' &&
+          design.collector.curve.waterContentLPerM2 >= SOFT_ABSORBER_L_PER_M2,
+        () =>
+          'A siphon return pulls a vacuum at the top of the array; a soft absorber collapses under it. Vent the top and let the pump pay the lift.',
+      ),
   },
   {
     id: 'H12',

@@ -143,12 +143,20 @@ export class HouseNetwork {
    * @param toAirW heat into the air node [W]
    * @param toSurfaceW heat into the surface node [W]
    * @param toMassW heat into the mass node [W]
+   * @param toSlabW heat into the slab [W]
    */
-  drive(outdoorC: number, airSupplyC: number, toAirW: number, toSurfaceW: number, toMassW: number): void {
+  drive(
+    outdoorC: number,
+    airSupplyC: number,
+    toAirW: number,
+    toSurfaceW: number,
+    toMassW: number,
+    toSlabW = 0,
+  ): void {
     const heat = this.h1 * airSupplyC + this.hW * outdoorC + this.airShare * toAirW + toSurfaceW;
     this.shared = heat / this.surfaceSum;
     this.toMass = this.hMs * this.shared + this.hEm * outdoorC + toMassW;
-    this.toSlab = this.hFilm * this.shared;
+    this.toSlab = this.hFilm * this.shared + toSlabW;
     this.toAir = this.hVe * airSupplyC + toAirW;
   }
 

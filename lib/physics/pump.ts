@@ -45,3 +45,28 @@ export function runningHeadM(liftM: number, frictionM: number, siphonReturn: boo
 export function pumpEnergyKwh(powerW: number, hours: number): number {
   return (powerW * hours) / WH_PER_KWH;
 }
+
+/**
+ * Flow at which a pump's curve H = H0 (1 − (Q/Q0)²) meets the head of the loop, by bisection.
+ * @param shutOffHeadM H0, head at no flow [m] above 0
+ * @param greatestKgPerS Q0, flow at no head [kg/s] above 0
+ * @param loopHeadM head of the loop over its flow [kg/s] → [m], rising
+ * @returns flow [kg/s]; 0 when the pump cannot lift the water
+ * @see running point of a centrifugal pump, ISO 17769-1 (terms); parabola through both ends: common practice, no source
+ */
+export function runningFlowKgPerS(
+  shutOffHeadM: number,
+  greatestKgPerS: number,
+  loopHeadM: (flowKgPerS: number) => number,
+): number {
+  const surplusM = (flow: number) => shutOffHeadM * (1 - (flow / greatestKgPerS) ** 2) - loopHeadM(flow);
+  if (surplusM(0) <= 0) return 0;
+  let low = 0;
+  let high = greatestKgPerS;
+  for (let round = 0; round < 60; round++) {
+    const middle = 0.5 * (low + high);
+    if (surplusM(middle) > 0) low = middle;
+    else high = middle;
+  }
+  return low;
+}

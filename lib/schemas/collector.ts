@@ -5,6 +5,44 @@ import { quantity, shortName } from './quantity';
 export const COVERS = ['none', 'film', 'glass', 'twin-wall', 'selective glass'] as const;
 export const COLLECTOR_ORIGINS = ['generic class', 'own build', 'certificate', 'own test'] as const;
 
+/** Modifiers at 0, 10 … 90°, as a certificate prints them. */
+function angleTable(label: string, values: readonly number[]) {
+  return z
+    .array(
+      quantity({
+        label: 'K',
+        unit: '',
+        min: 0,
+        max: 1.5,
+        step: 0.01,
+        default: 1,
+        origin: 'certificate',
+        source: 'table of the certificate’s annex',
+        help: 'Incidence-angle modifier at this angle; straight lines between (ISO 9806).',
+      }),
+    )
+    .length(10, { error: `${label}: ten values, from 0 to 90° in steps of 10°.` })
+    .default([...values])
+    .meta({ label });
+}
+
+/** A flat cover by its b0 of 0.12, so that choosing a table changes nothing before it is typed. */
+const FLAT_COVER = [1, 1, 0.99, 0.98, 0.96, 0.93, 0.88, 0.77, 0.43, 0];
+
+export const incidenceModifierSchema = z.discriminatedUnion('kind', [
+  z.object({ kind: z.literal('b0') }),
+  z.object({ kind: z.literal('table'), values: angleTable('Modifier table', FLAT_COVER) }),
+  z.object({
+    kind: z.literal('pair'),
+    longitudinal: angleTable('Along the ribs', FLAT_COVER),
+    transversal: angleTable('Across the ribs', FLAT_COVER),
+    ribs: z.enum(['along the slope', 'across the slope']).default('along the slope').meta({
+      label: 'Ribs run',
+      help: 'Webs of the sheet, ribs or tubes, as the collector hangs.',
+    }),
+  }),
+]);
+
 export const collectorCurveSchema = z.object({
   areaBasis: z.enum(['gross', 'aperture', 'absorber']).default('gross').meta({
     label: 'Area basis',
@@ -30,8 +68,9 @@ export const collectorCurveSchema = z.object({
     default: 0.12,
     origin: 'handbook',
     source: 'single cover, Souka and Safwat form',
-    help: 'K(θ) = 1 − b0 (1/cos θ − 1).',
+    help: 'K(θ) = 1 − b0 (1/cos θ − 1). Not read where a table stands below.',
   }),
+  modifier: incidenceModifierSchema.default({ kind: 'b0' }),
   diffuseModifier: quantity({
     label: 'Diffuse modifier Kd',
     unit: '',
@@ -97,6 +136,28 @@ export const collectorCurveSchema = z.object({
     origin: 'standard',
     source: 'ISO 9806: zero for covered collectors',
     help: 'Wind dependence of the peak efficiency; matters for unglazed mats.',
+  }),
+  a7: quantity({
+    label: 'Wind and sky term a7',
+    unit: 's/m',
+    min: 0,
+    max: 0.2,
+    step: 0.001,
+    default: 0,
+    origin: 'standard',
+    source: 'ISO 9806: zero for covered collectors',
+    help: 'Wind dependence of the long-wave exchange; matters for unglazed mats.',
+  }),
+  a8: quantity({
+    label: 'Radiation loss a8',
+    unit: 'W/(m²K⁴)',
+    min: 0,
+    max: 0.000001,
+    step: 0.000000001,
+    default: 0,
+    origin: 'standard',
+    source: 'ISO 9806: for collectors far above 100 °C',
+    help: 'Fourth-power loss, for example 2e-9. In the year it is folded into a2 at 40 K above the air.',
   }),
   dryCapacityJPerM2K: quantity({
     label: 'Capacity, empty',

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import type { Design } from '@/lib/simulation/design';
+import { LAYOUTS, type Design } from '@/lib/simulation/design';
 import { collectorSchema } from './collector';
 import { quantity, shortName } from './quantity';
 
@@ -36,6 +36,39 @@ export const arraySchema = z.object({
     origin: 'measured',
     source: 'demonstration: 12° west of south',
     help: 'Clockwise from true north; 180° = south.',
+  }),
+  rows: quantity({
+    label: 'Rows',
+    unit: '',
+    min: 1,
+    max: 10,
+    step: 1,
+    default: 1,
+    origin: 'assumed',
+    source: 'one row; on a roof or wall none shades another',
+    help: 'Equal rows behind one another on level ground. Each shades the next while the sun is low.',
+  }),
+  rowSpacingM: quantity({
+    label: 'Row to row',
+    unit: 'm',
+    min: 0.5,
+    max: 20,
+    step: 0.1,
+    default: 5,
+    origin: 'assumed',
+    source: 'clears the shadow of 2 m rows at 65° and 46° north at noon in December, nearly',
+    help: 'From front edge to front edge. Read with two rows or more.',
+  }),
+  rowHeightM: quantity({
+    label: 'Row, up the slope',
+    unit: 'm',
+    min: 0.3,
+    max: 10,
+    step: 0.1,
+    default: 2,
+    origin: 'assumed',
+    source: 'one collector high',
+    help: 'From the lower to the upper edge of one row, along the slope. Read with two rows or more.',
   }),
   mountedMonths: z.array(z.boolean()).length(12).default(Array<boolean>(12).fill(true)).meta({
     label: 'Months mounted',
@@ -129,6 +162,94 @@ export const arraySchema = z.object({
     source: 'small circulators 0.10 to 0.25; no source',
     help: 'Hydraulic power divided by electric power.',
   }),
+});
+
+export const loopSchema = z.object({
+  layout: z.enum(LAYOUTS).default('through the store').meta({
+    label: 'Layout',
+    help: 'Store water through the array; a separate drain-back vessel with an exchanger to the store; or no store, the array heats the floor slab.',
+  }),
+  exchangerEffectiveness: quantity({
+    label: 'Loop exchanger',
+    unit: '',
+    min: 0.2,
+    max: 0.98,
+    step: 0.01,
+    default: 0.7,
+    origin: 'common practice',
+    source: 'no source',
+    help: 'Effectiveness at balanced flow; only with a vessel.',
+  }),
+  vesselReserveL: quantity({
+    label: 'Vessel reserve',
+    unit: 'L',
+    min: 2,
+    max: 500,
+    step: 1,
+    default: 30,
+    origin: 'common practice',
+    source: 'keeps the pump under water while the array is full; no source',
+    help: 'Water in the vessel beyond that of array and pipes; with a vessel or straight to the slab.',
+  }),
+  vesselLossWPerK: quantity({
+    label: 'Vessel loss',
+    unit: 'W/K',
+    min: 0,
+    max: 20,
+    step: 0.1,
+    default: 2,
+    origin: 'assumed',
+    source: '60 mm insulation',
+    help: 'While the water rests in the vessel.',
+  }),
+  slabRoomLimitC: quantity({
+    label: 'Rooms, at most',
+    unit: '°C',
+    min: 19,
+    max: 30,
+    step: 0.5,
+    default: 24,
+    origin: 'common practice',
+    source: 'no source',
+    help: 'Room air above which the array stops heating the slab; only straight to the slab.',
+  }),
+  pump: z
+    .object({
+      kind: z
+        .enum(['flow', 'curve'])
+        .default('flow')
+        .meta({
+          label: 'Flow from',
+          help: 'The specific flow above, or the pump’s curve against lift and pipes.',
+        }),
+      shutOffHeadM: quantity({
+        label: 'Head at no flow',
+        unit: 'm',
+        min: 0.5,
+        max: 40,
+        step: 0.1,
+        default: 7,
+        origin: 'typed',
+        source: 'data sheet of the pump',
+        help: 'The pump must lift the water to the top of the array; only for a curve.',
+      }),
+      greatestFlowLPerS: quantity({
+        label: 'Flow at no head',
+        unit: 'L/s',
+        min: 0.02,
+        max: 5,
+        step: 0.01,
+        default: 0.9,
+        origin: 'typed',
+        source: 'data sheet of the pump',
+        help: 'H = H0 (1 − (Q/Q0)²); only for a curve.',
+      }),
+      returnPipe: z.enum(['vented', 'siphon']).default('vented').meta({
+        label: 'Return',
+        help: 'Vented at the top: the pump pays the lift all the time. Siphon: only while filling; not for soft absorbers, which collapse under vacuum.',
+      }),
+    })
+    .prefault({}),
 });
 
 export const controllerSchema = z.object({
@@ -306,6 +427,7 @@ export const designSchema = z.object({
   name: shortName('Design', 'Film rows'),
   collector: collectorSchema,
   array: arraySchema,
+  loop: loopSchema.prefault({}),
   controller: controllerSchema,
   store: storeSchema,
   supply: supplySchema,

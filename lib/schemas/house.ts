@@ -102,6 +102,31 @@ export const windowGainSchema = z.object({
   }),
 });
 
+export const horizonPointSchema = z.object({
+  azimuthDeg: quantity({
+    label: 'Direction',
+    unit: '°',
+    min: 0,
+    max: 360,
+    step: 1,
+    default: 180,
+    origin: 'typed',
+    source: 'compass, corrected to true north',
+    help: 'Clockwise from true north; 90° = east, 180° = south. A compass shows magnetic north: correct it.',
+  }),
+  altitudeDeg: quantity({
+    label: 'Height',
+    unit: '°',
+    min: 0,
+    max: 85,
+    step: 1,
+    default: 5,
+    origin: 'typed',
+    source: 'inclinometer at the array',
+    help: 'Of hill, house or trees above the level horizon, seen from the array.',
+  }),
+});
+
 export const floorSchema = z.object({
   areaM2: quantity({
     label: 'Heated floor',
@@ -245,6 +270,24 @@ export const hotWaterSchema = z.object({
     source: 'EN 12976-2, annex B',
     help: 'Half the difference of warmest and coldest mains water.',
   }),
+  exchanger: z
+    .enum(['plate', 'coil'])
+    .default('plate')
+    .meta({
+      label: 'Preheated by',
+      help: 'A plate exchanger fed from the top of the store, or a coil that rises through it.',
+    }),
+  coilWPerK: quantity({
+    label: 'Coil',
+    unit: 'W/K',
+    min: 20,
+    max: 5000,
+    step: 10,
+    default: 500,
+    origin: 'assumed',
+    source: 'about 25 m of 22 mm pipe',
+    help: 'Heat transfer of the whole coil; only for a coil.',
+  }),
   exchangerEffectiveness: quantity({
     label: 'Preheat exchanger',
     unit: '',
@@ -287,13 +330,10 @@ export const backupSchema = z.object({
   }),
   heatPump: z
     .object({
-      source: z
-        .enum(['outdoor air', 'ground'])
-        .default('outdoor air')
-        .meta({
-          label: 'Heat pump takes heat from',
-          help: 'The source fixes its coefficient of performance hour by hour.',
-        }),
+      source: z.enum(['outdoor air', 'ground']).default('outdoor air').meta({
+        label: 'Heat pump takes heat from',
+        help: 'The source fixes its coefficient of performance hour by hour.',
+      }),
       groundC: quantity({
         label: 'Ground source',
         unit: '°C',
@@ -321,13 +361,10 @@ export const backupSchema = z.object({
 });
 
 export const setbackSchema = z.object({
-  on: z
-    .boolean()
-    .default(false)
-    .meta({
-      label: 'Night setback',
-      help: 'A lower set point at night. The outdoor reset keeps its day curve.',
-    }),
+  on: z.boolean().default(false).meta({
+    label: 'Night setback',
+    help: 'A lower set point at night. The outdoor reset keeps its day curve.',
+  }),
   nightC: quantity({
     label: 'Room at night',
     unit: '°C',
@@ -400,6 +437,11 @@ export const houseSchema = z.object({
     help: 'Mean exchange of air with the outdoors.',
   }),
   windows: z.array(windowGainSchema).max(20),
+  horizon: z
+    .array(horizonPointSchema)
+    .max(72, { error: 'Horizon: 72 points at most.' })
+    .default([])
+    .meta({ label: 'Horizon' }),
   capacityClass: z
     .enum(['very light', 'light', 'medium', 'heavy', 'very heavy'])
     .default('medium')

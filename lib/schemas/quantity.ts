@@ -32,6 +32,7 @@ export const UNITS = [
   'W/(m K)',
   'W/(m²K)',
   'W/(m²K²)',
+  'W/(m²K⁴)',
   'm²K/W',
   'J/(m K)',
   'J/(m²K)',

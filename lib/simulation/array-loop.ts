@@ -23,6 +23,13 @@ export interface ArrayLoopInput {
   /** loss of the pipe of one way [W/K] */
   pipeLossWPerK: number;
   flowKgPerS: number;
+  /** heat handed to the sink / greatest possible, 1 when the sink's own water runs through the array [-] */
+  handover: number;
+  /** the loop has its own vessel: its water rests there, not in the store */
+  ownVessel: boolean;
+  /** loss of the vessel while the water rests in it [W/K], room around it [°C] */
+  vesselLossWPerK: number;
+  vesselRoomC: number;
   startK: number;
   stopK: number;
   inhibitC: number;
@@ -36,6 +43,9 @@ export class ArrayLoop {
   private readonly flowWPerK: number;
   /** share of the excess over outdoor air that survives one pipe [-] */
   private readonly pipeKept: number;
+  /** inlet − air = `fromArray` (T − air) + `fromSink` (sink − air) */
+  private readonly fromArray: number;
+  private readonly fromSink: number;
 
   /** hour's drive: absorbed sun [W/m²], linear loss [W/(m²K)], outdoor air [°C] */
   absorbedWm2 = 0.5;
@@ -46,13 +56,14 @@ export class ArrayLoop {
   /** water and plate while full, plate while empty [°C] */
   arrayC = 10.5;
   pipeC = 10.5;
+  /** water resting in the loop's own vessel [°C] */
+  vesselC = 10.5;
   /** what is left of the minimum run [s] */
   mustRunS = 0.5;
-  starts = 0;
 
-  /** length of the sub-step [s], bottom layer of the store [°C]: set before each call that reads them */
+  /** length of the sub-step [s], sink (bottom layer of the store, or the slab) [°C]: set before each call that reads them */
   dtS = 0.5;
-  bottomC = 0.5;
+  sinkC = 0.5;
   /** time until the controller switches [s], water coming back to the store [°C]: answers of the last call */
   switchS = 0.5;
   chargeC = 0.5;
@@ -72,13 +83,19 @@ export class ArrayLoop {
     this.waterJPerK = input.waterKg * CP;
     this.fullJPerK = input.dryCapacityJPerK + this.waterJPerK;
     this.flowWPerK = input.flowKgPerS * CP;
-    this.pipeKept = this.flowWPerK > 0 ? Math.exp(-input.pipeLossWPerK / this.flowWPerK) : 0;
+    const kept = this.flowWPerK > 0 ? Math.exp(-input.pipeLossWPerK / this.flowWPerK) : 0;
+    const shared = 1 + kept * kept * (1 - input.handover);
+    this.pipeKept = kept;
+    this.fromArray = (2 * kept * kept * (1 - input.handover)) / shared;
+    this.fromSink = (kept * input.handover) / shared;
   }
 
   /** Heat held by plate, water and pipe wall above 0 °C, water in the store not counted [J]. */
   heatJ(): number {
-    const array = this.full ? this.fullJPerK : this.input.dryCapacityJPerK;
-    return array * this.arrayC + this.input.pipeCapacityJPerK * this.pipeC;
+    const { dryCapacityJPerK, pipeCapacityJPerK, ownVessel } = this.input;
+    const array = this.full ? this.fullJPerK : dryCapacityJPerK;
+    const vessel = ownVessel && !this.full ? this.waterJPerK * this.vesselC : 0;
+    return array * this.arrayC + pipeCapacityJPerK * this.pipeC + vessel;
   }
 
   /**
@@ -112,7 +129,7 @@ export class ArrayLoop {
 
   /** Time until the pump may start, into `switchS`: plate above bottom + start difference and below the inhibit temperature. */
   findStart(): void {
-    const start = this.bottomC + this.input.startK;
+    const start = this.sinkC + this.input.startK;
     const inhibit = this.input.inhibitC;
     const plate = this.arrayC;
     let time = Infinity;
@@ -144,21 +161,34 @@ export class ArrayLoop {
       this.pipeLossJ = pipeCapacityJPerK * pipeGap * (1 - kept);
       this.pipeC = this.outdoorC + pipeGap * kept;
     }
+    if (this.input.ownVessel && this.waterJPerK > 0) this.coolVessel();
   }
 
-  /** Water temperature at the array's inlet for water of `bottomC` leaving the store [°C]. */
-  private inletC(): number {
-    return this.outdoorC + (this.bottomC - this.outdoorC) * this.pipeKept;
+  /** Water resting in the vessel cools towards its room; booked with the pipes. */
+  private coolVessel(): void {
+    const { vesselLossWPerK, vesselRoomC } = this.input;
+    const gap = this.vesselC - vesselRoomC;
+    const kept = Math.exp((-vesselLossWPerK * this.dtS) / this.waterJPerK);
+    this.pipeLossJ += this.waterJPerK * gap * (1 - kept);
+    this.vesselC = vesselRoomC + gap * kept;
   }
 
-  /** Prepares a running sub-step with inlet water from `bottomC`. */
+  /** Prepares a running sub-step: the sink's water, pipes and hand-over seen from the array. */
   prepareRunning(): void {
-    this.linearise(2 * this.flowWPerK, this.inletC(), this.fullJPerK);
+    const { outdoorC, sinkC, fromArray, fromSink } = this;
+    const excess = (fromSink / (1 - fromArray)) * (sinkC - outdoorC);
+    this.linearise(2 * this.flowWPerK * (1 - fromArray), outdoorC + excess, this.fullJPerK);
+  }
+
+  /** Array temperature at which outlet − inlet is the stop difference [°C]. */
+  private stopC(): number {
+    const { outdoorC, sinkC, fromArray, fromSink } = this;
+    return outdoorC + (0.5 * this.input.stopK + fromSink * (sinkC - outdoorC)) / (1 - fromArray);
   }
 
   /** Time until outlet − inlet falls below the stop difference, not before the minimum run is over; into `switchS`. */
   findStop(): void {
-    const stop = this.inletC() + 0.5 * this.input.stopK;
+    const stop = this.stopC();
     let time = Infinity;
     if (this.arrayC <= stop + 1e-9) time = 0;
     else if (this.root < stop) time = this.timeTo(stop);
@@ -167,71 +197,82 @@ export class ArrayLoop {
 
   /** Whether outlet − inlet is below the stop difference now and the minimum run is over. */
   wantsStop(): boolean {
-    return this.mustRunS <= 1e-7 && this.arrayC <= this.inletC() + 0.5 * this.input.stopK + 1e-9;
+    return this.mustRunS <= 1e-7 && this.arrayC <= this.stopC() + 1e-9;
   }
 
-  /** Mean temperature at which the water of the sub-step comes back to the store, into `chargeC`; state untouched. */
+  /** Mean temperature at which heat comes to the sink in the sub-step, into `chargeC`; state untouched. */
   findCharge(): void {
+    const { outdoorC, sinkC, pipeKept } = this;
     const x = this.decay * this.dtS;
     const gap = this.arrayC - this.root;
     const meanGap = x > 1e-9 ? (gap * (1 - Math.exp(-x))) / x : gap;
-    const outletC = 2 * (this.root + meanGap) - this.inletC();
-    this.chargeC = this.outdoorC + (outletC - this.outdoorC) * this.pipeKept;
+    const array = this.root + meanGap - outdoorC;
+    const inlet = this.fromArray * array + this.fromSink * (sinkC - outdoorC);
+    const hotC = outdoorC + (2 * array - inlet) * pipeKept;
+    this.chargeC = sinkC + this.input.handover * (hotC - sinkC);
   }
 
-  /** Moves `bottomC` to the mean of the sub-step and the root with it; exact for the linearised balance. */
-  shiftBottom(meanBottomC: number): void {
+  /** Moves `sinkC` to the mean of the sub-step and the root with it; exact for the linearised balance. */
+  shiftSink(meanSinkC: number): void {
     const flow = 2 * this.flowWPerK;
-    const step = (flow * (meanBottomC - this.bottomC) * this.pipeKept) / (this.decay * this.fullJPerK);
+    const step = (flow * (meanSinkC - this.sinkC) * this.fromSink) / (this.decay * this.fullJPerK);
     this.root += step;
     this.rootLossWm2 += this.slope * step;
-    this.bottomC = meanBottomC;
+    this.sinkC = meanSinkC;
   }
 
-  /** The running array over `dtS`, after `shiftBottom` and `findCharge`. */
+  /** The running array over `dtS`, after `shiftSink` and `findCharge`. */
   advanceRunning(): void {
     const { areaM2 } = this.input;
-    const { dtS, bottomC, chargeC } = this;
+    const { dtS, outdoorC, sinkC, chargeC } = this;
     const x = this.decay * dtS;
     const e = Math.exp(-x);
     const gap = this.arrayC - this.root;
     const meanGap = x > 1e-9 ? (gap * (1 - e)) / x : gap;
-    const inletC = this.inletC();
-    const outletC = 2 * (this.root + meanGap) - inletC;
+    const array = this.root + meanGap - outdoorC;
+    const inlet = this.fromArray * array + this.fromSink * (sinkC - outdoorC);
     this.arrayLossJ = areaM2 * (this.rootLossWm2 + this.slope * meanGap) * dtS;
-    this.pipeLossJ = this.flowWPerK * (bottomC - inletC + (outletC - chargeC)) * dtS;
-    this.givenJ = this.flowWPerK * (chargeC - bottomC) * dtS;
+    this.givenJ = this.flowWPerK * (chargeC - sinkC) * dtS;
+    this.pipeLossJ = 2 * this.flowWPerK * (array - inlet) * dtS - this.givenJ;
     this.arrayC = this.root + gap * e;
     this.mustRunS -= dtS;
   }
 
-  /** The pump starts: water of the bottom layer meets the dry plate and the pipe wall. */
+  /** The pump starts: water of the bottom layer, or of the loop's own vessel, meets the dry plate and the pipe wall. */
   fill(store: StoreLayers): void {
-    const { dryCapacityJPerK, pipeCapacityJPerK, waterKg } = this.input;
-    const bottomC = store.bottomC;
-    const pipeHeatJ = pipeCapacityJPerK * (bottomC - this.pipeC);
-    store.takeFromBottom(waterKg);
-    this.arrayC = (dryCapacityJPerK * this.arrayC + this.waterJPerK * bottomC) / this.fullJPerK;
-    this.pipeC = bottomC;
-    store.coolBottom(pipeHeatJ);
+    const { dryCapacityJPerK, pipeCapacityJPerK, waterKg, ownVessel } = this.input;
+    const waterC = ownVessel ? this.vesselC : store.bottomC;
+    const pipeHeatJ = pipeCapacityJPerK * (waterC - this.pipeC);
+    this.arrayC = (dryCapacityJPerK * this.arrayC + this.waterJPerK * waterC) / this.fullJPerK;
+    this.pipeC = waterC;
+    if (ownVessel) this.arrayC -= pipeHeatJ / this.fullJPerK;
+    else {
+      store.takeFromBottom(waterKg);
+      store.coolBottom(pipeHeatJ);
+    }
     this.full = true;
     this.mustRunS = this.input.minimumRunS;
-    this.starts++;
   }
 
-  /** The pump stops: the outdoor water comes home at its temperature into its level. */
+  /** The pump stops: the outdoor water comes home at its temperature, into its level of the store or into the vessel. */
   drain(store: StoreLayers): void {
-    store.bringHome(this.input.waterKg, this.arrayC);
+    if (this.input.ownVessel) this.vesselC = this.arrayC;
+    else store.bringHome(this.input.waterKg, this.arrayC);
     this.full = false;
   }
 
   /**
-   * The array is put up or taken down: the plate takes the temperature of outdoor air.
+   * The array is put up or taken down: the plate takes the temperature of outdoor air, a vessel that of its room.
    * @returns heat that leaves with it [J]
    */
   relax(): number {
-    const heat = this.input.dryCapacityJPerK * (this.arrayC - this.outdoorC);
+    const { dryCapacityJPerK, ownVessel, vesselRoomC } = this.input;
+    let heat = dryCapacityJPerK * (this.arrayC - this.outdoorC);
     this.arrayC = this.outdoorC;
+    if (ownVessel) {
+      heat += this.waterJPerK * (this.vesselC - vesselRoomC);
+      this.vesselC = vesselRoomC;
+    }
     return heat;
   }
 }

@@ -1,12 +1,11 @@
-import { linearLoss } from '@/lib/physics/collector';
+import { linearLoss, quadraticLoss, REFERENCE_WIND_M_PER_S } from '@/lib/physics/collector';
 import { slabCapacity, supplyToSlabConductance } from '@/lib/physics/floor';
 import { heatPumpCop } from '@/lib/physics/heat-pump';
 import { mainsC, tappingShares } from '@/lib/physics/hot-water';
-import { beamModifier } from '@/lib/physics/incidence-angle';
 import { resetSupplyC } from '@/lib/physics/outdoor-reset';
 import { radiatorHeat } from '@/lib/physics/radiator';
 import { pressureDropPa } from '@/lib/physics/pipe-flow';
-import { frictionHeadM, liftPowerW, runningHeadM } from '@/lib/physics/pump';
+import { frictionHeadM, liftPowerW, runningFlowKgPerS, runningHeadM } from '@/lib/physics/pump';
 import { layerLossesWPerK } from '@/lib/physics/store-loss';
 import {
   waterDensity,
@@ -27,6 +26,7 @@ import {
   toRadians,
 } from '@/lib/units/constants';
 import type { WeatherYear } from '@/lib/weather/weather-year';
+import { acceptedSun } from './accepted-sun';
 import type { Collector, CollectorArray, Design, House, SkyModel } from './design';
 import { dryColumns, type DryColumns } from './dry-hours';
 import { emitterLoop, houseHeat } from './house-heat';
@@ -48,6 +48,11 @@ const STEPS_PER_HOUR = 4;
 /** A run is given up beyond this many sub-steps; an ordinary design takes about 50,000. */
 const SUB_STEP_CAP = 4_000_000;
 const KEPT = 12;
+/** Locks open again this far below their limit: store top, room air [K]. */
+const STORE_UNLOCK_K = 2;
+const SLAB_UNLOCK_K = 0.5;
+/** Greatest share of heat that an exchanger is trusted with [-]. */
+const GREATEST_HANDOVER = 0.98;
 /** A small flow that stands for none where a flow divides. */
 const NO_FLOW = 1e-9;
 
@@ -90,7 +95,7 @@ export class PlanBuilder {
     const { house, design, numerics } = input;
     const { site } = this.siteOf(input.weather);
     const { collector, array } = design;
-    const plane = site.plane(array, numerics.skyModel);
+    const plane = site.plane(array, numerics.skyModel, { horizon: house.horizon, rows: array });
     const collectorColumns = this.collectorColumns(site, plane, collector, array);
     const columns: PlanColumns = {
       outdoorC: site.outdoorC,
@@ -100,18 +105,23 @@ export class PlanBuilder {
       ...this.houseColumns(input),
     };
     const hasArray = array.areaM2 > 0 && array.mountedMonths.some(Boolean);
+    const toSlab = design.loop.layout === 'straight to the slab';
+    const housePlan = this.housePlan(house, design);
+    const pump = pumpDuty(design);
     const storeKg = design.store.volumeL * WATER_KG_PER_L;
     const baseM2 = design.store.volumeL / L_PER_M3 / design.store.heightM;
     return {
-      ...this.housePlan(house, design),
+      ...housePlan,
       columns,
       theta: numerics.theta,
       stepsPerHour: STEPS_PER_HOUR,
       subStepCap: SUB_STEP_CAP,
       hasArray,
-      array: arrayInput(design),
-      storeLimitC: design.controller.storeLimitC,
-      pumpW: pumpPowerW(array),
+      array: arrayInput(design, pump.flowKgPerS, housePlan),
+      toSlab,
+      limitC: toSlab ? design.loop.slabRoomLimitC : design.controller.storeLimitC,
+      unlockK: toSlab ? SLAB_UNLOCK_K : STORE_UNLOCK_K,
+      pumpW: pump.powerW,
       layers: design.store.layers,
       storeKg,
       storeLossWPerK: layerLossesWPerK({
@@ -124,7 +134,7 @@ export class PlanBuilder {
       }),
       conductionWPerK: (STORE_CONDUCTIVITY * baseM2 * design.store.layers) / design.store.heightM,
       storeRoomC: design.store.roomC,
-      storeInside: design.store.insideHouse,
+      storeInside: design.store.insideHouse && !toSlab,
     };
   }
 
@@ -157,16 +167,17 @@ export class PlanBuilder {
       dry,
       faceLayerM2KPerW,
       curve.b0,
+      curve.modifier,
       curve.diffuseModifier,
+      input.house.horizon,
       dry.kind === 'declared' ? [curve.eta0Beam, curve.a1, curve.a2] : 0,
     ]);
     return this.dryYears.get(key, () => {
-      const plane = site.plane(array, skyModel);
-      const acceptedWm2 = new Float64Array(HOURS_PER_YEAR);
-      for (let h = 0; h < HOURS_PER_YEAR; h++) acceptedWm2[h] = accepted(plane, collector, h);
+      // the first row stands free of the others, and is the hottest
+      const plane = site.plane(array, skyModel, { horizon: input.house.horizon });
       return dryColumns(collector, array, {
         planeWm2: plane.totalWm2,
-        acceptedWm2,
+        acceptedWm2: acceptedSun(curve, plane, array, site.sun),
         outdoorC: site.outdoorC,
         windMPerS: site.windMPerS,
         skyLongwaveWm2: input.weather.skyLongwaveWm2,
@@ -180,18 +191,21 @@ export class PlanBuilder {
     collector: Collector,
     array: CollectorArray,
   ): Pick<PlanColumns, 'absorbedWm2' | 'a1'> {
-    const { eta0Beam, a1, a3, a4, a6 } = collector.curve;
+    const { eta0Beam, a1, a3, a4, a6, a7 } = collector.curve;
+    const accepted = acceptedSun(collector.curve, plane, array, site.sun);
     const absorbedWm2 = new Float64Array(HOURS_PER_YEAR);
     const loss = new Float64Array(HOURS_PER_YEAR);
     const toSky = 0.5 * (1 + Math.cos(toRadians(array.tiltDeg)));
     const longwave = site.weather.skyLongwaveWm2;
     for (let h = 0; h < HOURS_PER_YEAR; h++) {
       const wind = site.windMPerS[h]! * array.windFactor;
-      let sun = eta0Beam * accepted(plane, collector, h);
-      if (a6 !== 0) sun = Math.max(0, sun - a6 * (wind - 3) * plane.totalWm2[h]!);
-      if (a4 !== 0) {
+      const reducedWind = wind - REFERENCE_WIND_M_PER_S;
+      let sun = eta0Beam * accepted[h]!;
+      if (a6 !== 0) sun = Math.max(0, sun - a6 * reducedWind * plane.totalWm2[h]!);
+      if (a4 !== 0 || a7 !== 0) {
         // towards the ground the plane sees surfaces at about air temperature: only the sky counts
-        sun += a4 * toSky * (longwave[h]! - STEFAN_BOLTZMANN * toKelvin(site.outdoorC[h]!) ** 4);
+        const net = longwave[h]! - STEFAN_BOLTZMANN * toKelvin(site.outdoorC[h]!) ** 4;
+        sun += (a4 - a7 * reducedWind) * toSky * net;
       }
       absorbedWm2[h] = sun;
       loss[h] = linearLoss(a1, a3, wind);
@@ -204,8 +218,9 @@ export class PlanBuilder {
   ): Omit<PlanColumns, 'outdoorC' | 'planeWm2' | 'mounted' | 'absorbedWm2' | 'a1'> {
     const { house, design, numerics, weather } = input;
     const { site, id } = this.siteOf(weather);
-    const windowSunW = this.windows.get(JSON.stringify([id, house.windows, numerics.skyModel]), () =>
-      windowSun(site, house, numerics.skyModel),
+    const windowSunW = this.windows.get(
+      JSON.stringify([id, house.windows, house.horizon, numerics.skyModel]),
+      () => windowSun(site, house, numerics.skyModel),
     );
     const loop = emitterLoop(house, houseHeat(house), design.supply);
     const curve = {
@@ -256,6 +271,7 @@ export class PlanBuilder {
       floorWPerK: hasFloor
         ? supplyToSlabConductance(floor.areaM2, loop.floorKH, Math.max(NO_FLOW, loop.floorKgPerS) * CP)
         : 0,
+      floorKH: loop.floorKH,
       floorAreaM2: hasFloor ? floor.areaM2 : 0,
       floorDownward: floor.downwardLoss,
       radiatorWPerK: this.radiators.get(JSON.stringify([ideal, radiators, loop.radiatorKgPerS]), () =>
@@ -263,24 +279,18 @@ export class PlanBuilder {
       ),
       tapSetC: house.hotWater.setC,
       exchangerEffectiveness: house.hotWater.exchangerEffectiveness,
+      coilWPerK: house.hotWater.exchanger === 'coil' ? house.hotWater.coilWPerK : 0,
       ratedW: house.backup.ratedW,
     };
   }
-}
-
-/** Sun accepted by the optics in hour `h`: Kb Gb + Kd (Gd + Gr) [W/m²]. */
-function accepted(plane: PlaneYear, collector: Collector, h: number): number {
-  const { b0, diffuseModifier } = collector.curve;
-  const beam = plane.beamWm2[h]!;
-  const rest = diffuseModifier * (plane.diffuseWm2[h]! + plane.groundWm2[h]!);
-  return beam > 0 ? rest + beam * beamModifier(b0, Math.cos(toRadians(plane.incidenceDeg[h]!))) : rest;
 }
 
 function windowSun(site: SiteCache, house: House, model: SkyModel): Float64Array {
   const gain = new Float64Array(HOURS_PER_YEAR);
   for (const window of house.windows) {
     const aperture = solarApertureM2(window.areaM2, window.frameFraction, window.gValue, window.shade);
-    const plane = site.plane({ tiltDeg: 90, azimuthDeg: window.azimuthDeg }, model);
+    const wall = { tiltDeg: 90, azimuthDeg: window.azimuthDeg };
+    const plane = site.plane(wall, model, { horizon: house.horizon });
     for (let h = 0; h < HOURS_PER_YEAR; h++) gain[h]! += aperture * plane.totalWm2[h]!;
   }
   return gain;
@@ -350,40 +360,79 @@ function boreSectionM2(boreMm: number): number {
   return 0.25 * Math.PI * (boreMm / MM_PER_M) ** 2;
 }
 
-function arrayInput(design: Design): Plan['array'] {
-  const { array, collector, controller } = design;
+function arrayInput(
+  design: Design,
+  flowKgPerS: number,
+  house: { floorKH: number; floorAreaM2: number; floorDownward: number },
+): Plan['array'] {
+  const { array, collector, controller, loop, store } = design;
   const areaM2 = array.areaM2 * collector.widthFactor;
   const pipeWaterL = 2 * array.pipeLengthM * boreSectionM2(array.pipeBoreMm) * L_PER_M3;
+  const ownVessel = loop.layout !== 'through the store';
+  const reserveL = ownVessel ? loop.vesselReserveL : 0;
+  const waterL = collector.curve.waterContentLPerM2 * areaM2 + pipeWaterL + reserveL;
   return {
     areaM2,
-    a2: collector.curve.a2,
+    a2: quadraticLoss(collector.curve.a2, collector.curve.a8),
     dryCapacityJPerK: collector.curve.dryCapacityJPerM2K * areaM2,
-    waterKg:
-      array.areaM2 > 0 ? (collector.curve.waterContentLPerM2 * areaM2 + pipeWaterL) * WATER_KG_PER_L : 0,
+    waterKg: array.areaM2 > 0 ? waterL * WATER_KG_PER_L : 0,
     pipeCapacityJPerK: 2 * array.pipeLengthM * array.pipeCapacityJPerMK,
     pipeLossWPerK: array.pipeLengthM * array.pipeLossWPerMK,
-    flowKgPerS: array.flowKgPerSM2 * array.areaM2,
-    startK: controller.startK,
+    flowKgPerS,
+    handover: handover(design, flowKgPerS, house),
+    ownVessel,
+    vesselLossWPerK: loop.vesselLossWPerK,
+    vesselRoomC: store.roomC,
+    // a pump that cannot lift the water never starts
+    startK: flowKgPerS > 0 ? controller.startK : Infinity,
     stopK: controller.stopK,
     inhibitC: controller.inhibitC,
     minimumRunS: controller.minimumRunS,
   };
 }
 
-/** Electric power of the running pump: vented return, so the lift is paid all the time [W]. */
-function pumpPowerW(array: CollectorArray): number {
-  const flowKgPerS = array.flowKgPerSM2 * array.areaM2;
+/** Share of the greatest possible heat that reaches the sink: all of it, the exchanger's, or the floor's at this flow. */
+function handover(
+  design: Design,
+  flowKgPerS: number,
+  house: { floorKH: number; floorAreaM2: number; floorDownward: number },
+): number {
+  const { layout, exchangerEffectiveness } = design.loop;
+  if (layout === 'through the store') return 1;
+  if (layout === 'vessel with exchanger') return exchangerEffectiveness;
+  if (house.floorAreaM2 <= 0 || flowKgPerS <= 0) return GREATEST_HANDOVER;
+  const flowWPerK = flowKgPerS * CP;
+  const up = supplyToSlabConductance(house.floorAreaM2, house.floorKH, flowWPerK);
+  return Math.min(GREATEST_HANDOVER, up / ((1 - house.floorDownward) * flowWPerK));
+}
+
+/** Flow and electric power of the running pump: the flow is given, or follows from its curve against lift and pipes. */
+export function pumpDuty(design: Design): { flowKgPerS: number; powerW: number; fillHeadM: number } {
+  const { array, loop } = design;
   const density = waterDensity(FRICTION_WATER_C);
-  const pressurePa = pressureDropPa(
-    {
-      lengthM: 2 * array.pipeLengthM,
-      boreM: array.pipeBoreMm / MM_PER_M,
-      roughnessM: PIPE_ROUGHNESS_M,
-      fittings: LOOP_FITTINGS,
-    },
-    flowKgPerS / density,
-    { density, viscosity: waterViscosity(FRICTION_WATER_C) },
-  );
-  const headM = runningHeadM(array.liftM, frictionHeadM(pressurePa, density), false);
-  return liftPowerW(flowKgPerS, headM, array.pumpEfficiency);
+  const viscosity = waterViscosity(FRICTION_WATER_C);
+  const run = {
+    lengthM: 2 * array.pipeLengthM,
+    boreM: array.pipeBoreMm / MM_PER_M,
+    roughnessM: PIPE_ROUGHNESS_M,
+    fittings: LOOP_FITTINGS,
+  };
+  const frictionM = (flowKgPerS: number) =>
+    frictionHeadM(pressureDropPa(run, flowKgPerS / density, { density, viscosity }), density);
+  const siphon = loop.pump.returnPipe === 'siphon';
+  const given = array.flowKgPerSM2 * array.areaM2;
+  const flowKgPerS =
+    loop.pump.kind === 'flow' || array.areaM2 <= 0
+      ? given
+      : runningFlowKgPerS(
+          loop.pump.shutOffHeadM,
+          (loop.pump.greatestFlowLPerS * density) / L_PER_M3,
+          (flow) => runningHeadM(array.liftM, frictionM(flow), siphon),
+        );
+  const headM = runningHeadM(array.liftM, frictionM(flowKgPerS), siphon);
+  return {
+    flowKgPerS,
+    powerW: liftPowerW(flowKgPerS, headM, array.pumpEfficiency),
+    fillHeadM: runningHeadM(array.liftM, frictionM(0.5 * flowKgPerS), false),
+  };
 }

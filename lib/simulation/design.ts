@@ -1,4 +1,6 @@
 import type { CapacityClass } from '@/lib/physics/house-network';
+import type { IncidenceModifier } from '@/lib/physics/incidence-angle';
+import type { HorizonPoint } from '@/lib/sun/horizon';
 
 /**
  * The engine's own view of its inputs: plain objects in SI-based trade units. The zod schemas of
@@ -15,6 +17,8 @@ export interface CollectorCurve {
   eta0Beam: number;
   /** b0 of the beam incidence-angle modifier [-] */
   b0: number;
+  /** whether the beam's modifier follows b0, a table, or two tables along and across ribs */
+  modifier: IncidenceModifier;
   /** Kd [-] */
   diffuseModifier: number;
   /** a1 [W/(m²K)] at 3 m/s */
@@ -27,6 +31,10 @@ export interface CollectorCurve {
   a4: number;
   /** a6 [s/m] */
   a6: number;
+  /** a7 [s/m] */
+  a7: number;
+  /** a8 [W/(m²K⁴)] */
+  a8: number;
   /** capacity of the empty collector [J/(m²K)] */
   dryCapacityJPerM2K: number;
   /** water held when full [L/m²] */
@@ -82,6 +90,12 @@ export interface CollectorArray {
   tiltDeg: number;
   /** clockwise from north [°]; 180 = south */
   azimuthDeg: number;
+  /** equal rows behind one another on level ground; 1 = none shades another */
+  rows: number;
+  /** from front edge to front edge [m] */
+  rowSpacingM: number;
+  /** of one row along the slope [m] */
+  rowHeightM: number;
   /** January first, twelve entries */
   mountedMonths: readonly boolean[];
   /** from the water level of the store to the top of the array [m] */
@@ -111,6 +125,29 @@ export interface Controller {
   minimumRunS: number;
 }
 
+/** How array, store and floor hang together. */
+export const LAYOUTS = ['through the store', 'vessel with exchanger', 'straight to the slab'] as const;
+export type Layout = (typeof LAYOUTS)[number];
+
+export interface Loop {
+  layout: Layout;
+  /** exchanger between the loop's vessel and the store, at balanced flow [-] */
+  exchangerEffectiveness: number;
+  /** water of the vessel beyond that of array and pipes [L] */
+  vesselReserveL: number;
+  vesselLossWPerK: number;
+  /** room air above which the array no longer heats the slab [°C] */
+  slabRoomLimitC: number;
+  pump: {
+    /** 'flow' = the specific flow is given; 'curve' = it follows from the pump's curve and the pipes */
+    kind: 'flow' | 'curve';
+    shutOffHeadM: number;
+    greatestFlowLPerS: number;
+    /** vented: the lift is paid all the time; siphon: only while filling */
+    returnPipe: 'vented' | 'siphon';
+  };
+}
+
 export interface Store {
   volumeL: number;
   heightM: number;
@@ -135,6 +172,7 @@ export interface SupplyControl {
 export interface Design {
   collector: Collector;
   array: CollectorArray;
+  loop: Loop;
   controller: Controller;
   store: Store;
   supply: SupplyControl;
@@ -192,7 +230,10 @@ export interface HotWater {
   profile: 'S' | 'M' | 'L' | 'XL';
   mainsMeanC: number;
   mainsAmplitudeK: number;
-  /** effectiveness of the preheat exchanger at balanced flow [-] */
+  exchanger: 'plate' | 'coil';
+  /** of the coil, from the store's bottom to its top [W/K] */
+  coilWPerK: number;
+  /** effectiveness of the plate exchanger at balanced flow [-] */
   exchangerEffectiveness: number;
 }
 
@@ -227,6 +268,8 @@ export interface House {
   shell: readonly ShellElement[];
   airChangePerH: number;
   windows: readonly WindowGain[];
+  /** skyline of the site for array and windows alike; level where empty */
+  horizon: readonly HorizonPoint[];
   capacityClass: CapacityClass;
   roomSetC: number;
   setback: Setback;

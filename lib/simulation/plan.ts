@@ -45,8 +45,12 @@ export interface Plan {
 
   /** false without an array in any month: then the store is not there either */
   hasArray: boolean;
+  /** the array heats the slab of the floor itself; there is no store */
+  toSlab: boolean;
   array: ArrayLoopInput;
-  storeLimitC: number;
+  /** sink above which charging is locked: top of the store, or room air with the slab as sink; unlocked this much lower */
+  limitC: number;
+  unlockK: number;
   pumpW: number;
 
   layers: number;
@@ -70,6 +74,8 @@ export interface Plan {
   loopKgPerS: number;
   /** supply water to slab, upward part [W/K] */
   floorWPerK: number;
+  /** K_H of EN 1264 [W/(m²K)] */
+  floorKH: number;
   floorAreaM2: number;
   floorDownward: number;
   /** radiators [W/K] by the excess of the supply over the room in steps of `EXCESS_STEP_K`, at the loop's flow */
@@ -77,5 +83,7 @@ export interface Plan {
 
   tapSetC: number;
   exchangerEffectiveness: number;
+  /** coil instead of a plate exchanger [W/K]; 0 = plate */
+  coilWPerK: number;
   ratedW: number;
 }

@@ -17,7 +17,7 @@ export interface SimulationInput {
 
 export type YearOutcome =
   | { ok: true; result: YearResult }
-  | { ok: false; code: 'too stiff' | 'not finite' | 'shell and floor disagree'; message: string };
+  | { ok: false; code: 'too stiff' | 'not finite' | 'shell and floor disagree' | 'layout'; message: string };
 
 /** Need of the house without sun and store, kept while house and supply stay as they are. */
 export interface ReferenceNeed {
@@ -71,7 +71,7 @@ export function createSimulator(): Simulator {
   return {
     run(input) {
       const plan = builder.plan(input);
-      const refused = shellRefusal(plan);
+      const refused = shellRefusal(plan) ?? layoutRefusal(plan);
       if (refused) return refused;
       const need = reference(input);
       if (typeof need === 'string') return failure(need);
@@ -99,4 +99,14 @@ function shellRefusal({ network }: Plan): YearOutcome | undefined {
 function failure(status: YearStatus): YearOutcome {
   const code = status === 'done' ? 'not finite' : status;
   return { ok: false, code, message: MESSAGES[code] };
+}
+
+function layoutRefusal(plan: Plan): YearOutcome | undefined {
+  if (!plan.toSlab || plan.floorWPerK > 0) return undefined;
+  return {
+    ok: false,
+    code: 'layout',
+    message:
+      'This design heats the floor slab, but the house has no heated floor. Give the house one, or lead the array through a store.',
+  };
 }

@@ -27,6 +27,9 @@ export class StoreFlows {
   tapKgPerS = 0.0;
   mainsC = 0.5;
   effectiveness = 0.5;
+  /** tap water through a coil from the bottom to the top [kg/s]; `coilKept` of its lag stays after one layer [-] */
+  coilKgPerS = 0.0;
+  coilKept = 0.5;
 }
 
 export class StoreLayers {
@@ -57,6 +60,10 @@ export class StoreLayers {
   /** mean top and bottom temperature of the last sub-step [°C], with which its energies are booked */
   topMeanC = 0.5;
   bottomMeanC = 0.5;
+  /** heat given to tap water in the last sub-step [W] */
+  tapW = 0.5;
+  private stageTap = 0.5;
+  private firstTap = 0.5;
   /** heat lost to the room in the last sub-step [J] */
   lossJ = 0.5;
 
@@ -166,9 +173,36 @@ export class StoreLayers {
     out[last] = net * perBottom - lossPerS[last]! * this.layerKg * perBottom * (here - room);
     if (charge > 0)
       out[f.chargeLevel]! += charge * f.chargeC * (f.chargeLevel === last ? perBottom : perLayer);
+    this.stageTap = f.tapKgPerS * (top - tapReturn);
+    if (f.coilKgPerS > 0) this.coil(t, out);
     if (f.heatingKgPerS > 0) {
       out[f.returnLevel]! += f.heatingKgPerS * f.returnC * (f.returnLevel === last ? perBottom : perLayer);
     }
+  }
+
+  /** Tap water rises through the coil and takes heat from each layer it passes. */
+  private coil(t: Float64Array, out: Float64Array): void {
+    const { coilKgPerS, coilKept, mainsC } = this.flows;
+    const last = this.count - 1;
+    let waterC = mainsC;
+    for (let i = last; i >= 0; i--) {
+      const leavingC = t[i]! + (waterC - t[i]!) * coilKept;
+      out[i]! -= (coilKgPerS * (leavingC - waterC)) / (i === last ? this.bottomKg : this.layerKg);
+      waterC = leavingC;
+    }
+    this.stageTap += coilKgPerS * (waterC - mainsC);
+  }
+
+  /**
+   * Temperature at which tap water would leave the coil now.
+   * @param kept share of the lag that stays after one layer, e^(−UA/(N ṁ c)) [-]
+   * @param mainsC cold water [°C]
+   * @returns outlet [°C]
+   */
+  coilOutletC(kept: number, mainsC: number): number {
+    let waterC = mainsC;
+    for (let i = this.count - 1; i >= 0; i--) waterC = this.t[i]! + (waterC - this.t[i]!) * kept;
+    return waterC;
   }
 
   /** First stage: rates at the present temperatures and the predicted temperatures after `dtS`. */
@@ -176,6 +210,7 @@ export class StoreLayers {
     const dtS = this.dtS;
     this.settleFlows();
     this.rates(this.t, this.rate);
+    this.firstTap = this.stageTap;
     for (let i = 0; i < this.count; i++) this.predicted[i] = this.t[i]! + dtS * this.rate[i]!;
     const last = this.count - 1;
     this.topMeanC = 0.5 * (this.t[0]! + this.predicted[0]!);
@@ -190,6 +225,7 @@ export class StoreLayers {
     const { flows: f, dtS } = this;
     const last = this.count - 1;
     this.rates(this.predicted, this.rate2);
+    this.tapW = 0.5 * CP * (this.firstTap + this.stageTap);
     const shift = f.chargeKgPerS * (f.chargeC - f.firstChargeC);
     if (shift !== 0) {
       this.rate[f.chargeLevel]! += shift / (f.chargeLevel === last ? this.bottomKg : this.layerKg);

@@ -23,7 +23,8 @@ const HALF_BAND_K = 0.5;
 const RADIATOR_TO_AIR = 0.7;
 /** Surplus of the store over the return that makes its draw worth while [K]. */
 const RETURN_MARGIN_K = 1;
-const UNLOCK_K = 2;
+/** Substitutions for the share of tap water that runs through a coil. */
+const COIL_ROUNDS = 3;
 
 const {
   SOLAR_HEATING,
@@ -64,10 +65,11 @@ export class YearState {
       plan.storeRoomC,
     );
     this.store.t.fill(plan.roomSetC);
-    this.store.takeFromBottom(-plan.array.waterKg);
+    if (!plan.array.ownVessel) this.store.takeFromBottom(-plan.array.waterKg);
     this.loop = new ArrayLoop(plan.array);
     this.loop.arrayC = plan.columns.outdoorC[0]!;
     this.loop.pipeC = plan.columns.outdoorC[0]!;
+    this.loop.vesselC = plan.array.vesselRoomC;
   }
 }
 
@@ -85,7 +87,8 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
   const stepsPerHour = plan.stepsPerHour;
   const stepS = SECONDS_PER_HOUR / stepsPerHour;
   const columns = plan.columns;
-  const { theta, ratedW, hasArray, storeLimitC, loopKgPerS, floorWPerK } = plan;
+  const { theta, ratedW, hasArray, toSlab, limitC, unlockK, loopKgPerS, floorWPerK, coilWPerK } = plan;
+  const drawsStore = hasArray && !toSlab;
   const floorShareUp = 1 - plan.floorDownward;
   const loopWPerK = loopKgPerS * CP;
   const hasFloor = floorWPerK > 0;
@@ -95,6 +98,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
   tally.begin(state);
   let subSteps = 0;
   let storeLossW = 0;
+  let slabSunW = 0;
   flows.mainsC = columns.mainsC[0]!;
   flows.effectiveness = plan.exchangerEffectiveness;
 
@@ -149,7 +153,11 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
     let massSum = 0;
 
     for (let step = 0; step < stepsPerHour; step++) {
-      if (storeInside) network.drive(outdoorC, outdoorC, gainToAir + storeLossW, gainToSurface, gainToMass);
+      // the free response takes the store's loss and the slab's sun of the step before
+      if (storeInside || toSlab) {
+        const inside = storeInside ? storeLossW : 0;
+        network.drive(outdoorC, outdoorC, gainToAir + inside, gainToSurface, gainToMass, slabSunW);
+      }
       network.solve();
 
       // thermostat: duty of the emitters at full flow and set supply, solved for the air of this step
@@ -196,13 +204,14 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
       let storeHeatJ = 0;
       let tapHeatJ = 0;
       let lossJ = 0;
+      let slabHeatJ = 0;
       while (rest > TIME_TOLERANCE_S) {
-        const topC = store.topC;
-        const bottomC = store.bottomC;
-        loop.bottomC = bottomC;
+        const topC = toSlab ? network.airC : store.topC;
+        const sinkC = toSlab ? network.slabC : store.bottomC;
+        loop.sinkC = sinkC;
         const held = switches >= SWITCH_CAP;
         if (loop.full) {
-          const overLimit = topC > storeLimitC;
+          const overLimit = topC > limitC;
           if (!held && (overLimit || loop.wantsStop())) {
             loop.drain(store);
             if (overLimit) state.locked = true;
@@ -210,23 +219,30 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
             continue;
           }
         } else if (state.locked) {
-          if (topC < storeLimitC - UNLOCK_K) state.locked = false;
-        } else if (topC > storeLimitC) state.locked = true;
+          if (topC < limitC - unlockK) state.locked = false;
+        } else if (topC > limitC) state.locked = true;
 
         let heatingKgPerS = 0;
-        if (hasArray && demandW > 0 && !plan.ideal) {
+        if (drawsStore && demandW > 0 && !plan.ideal) {
           if (topC >= supplyC) heatingKgPerS = (duty * loopKgPerS * (supplyC - returnC)) / (topC - returnC);
           else if (topC > returnC + RETURN_MARGIN_K) heatingKgPerS = duty * loopKgPerS;
         }
         let preheatKgPerS = 0;
-        if (hasArray && tapKgPerS > 0 && topC > mainsC) {
-          const preheatedK = flows.effectiveness * (topC - mainsC);
-          const wantedK = plan.tapSetC - mainsC;
-          preheatKgPerS = preheatedK > wantedK ? (tapKgPerS * wantedK) / preheatedK : tapKgPerS;
+        let coilKgPerS = 0;
+        if (drawsStore && tapKgPerS > 0 && topC > mainsC) {
+          if (coilWPerK > 0) {
+            coilKgPerS = coilFlow(store, tapKgPerS, mainsC, plan.tapSetC, coilWPerK);
+            flows.coilKept = Math.exp(-coilWPerK / (store.count * coilKgPerS * CP));
+          } else {
+            const preheatedK = flows.effectiveness * (topC - mainsC);
+            const wantedK = plan.tapSetC - mainsC;
+            preheatKgPerS = preheatedK > wantedK ? (tapKgPerS * wantedK) / preheatedK : tapKgPerS;
+          }
         }
         flows.heatingKgPerS = heatingKgPerS;
         flows.tapKgPerS = preheatKgPerS;
-        flows.chargeKgPerS = loop.full ? flowKgPerS : 0;
+        flows.coilKgPerS = coilKgPerS;
+        flows.chargeKgPerS = loop.full && !toSlab ? flowKgPerS : 0;
         flows.returnC = returnC;
         let dt = Math.min(rest, store.stepLimitS(theta));
 
@@ -254,36 +270,42 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
         store.dtS = dt;
         loop.dtS = dt;
         flows.returnLevel = heatingKgPerS > 0 ? store.levelFor(returnC) : 0;
-        if (loop.full) {
+        if (toSlab) {
+          store.lossJ = 0;
+          if (loop.full) {
+            loop.findCharge();
+            loop.advanceRunning();
+            slabHeatJ += loop.givenJ;
+            tally.book(loop, areaM2 * absorbedWm2 * dt, dt);
+            if (sinkC < tally.coldestInletC) tally.coldestInletC = sinkC;
+          }
+        } else if (loop.full) {
           loop.findCharge();
           flows.chargeC = flows.firstChargeC = loop.chargeC;
           flows.chargeLevel = store.levelFor(loop.chargeC);
           store.predict();
-          loop.shiftBottom(store.bottomMeanC);
+          loop.shiftSink(store.bottomMeanC);
           loop.findCharge();
           flows.chargeC = loop.chargeC;
           store.correct();
           loop.advanceRunning();
           tally.book(loop, areaM2 * absorbedWm2 * dt, dt);
-          if (bottomC < tally.coldestInletC) tally.coldestInletC = bottomC;
-        } else {
-          if (heatingKgPerS + preheatKgPerS > 0) {
-            flows.chargeLevel = 0;
-            store.predict();
-            store.correct();
-          } else store.rest();
-          if (mounted) {
-            loop.advanceEmpty();
-            tally.book(loop, areaM2 * absorbedWm2 * dt, 0);
-            if (loop.arrayC > tally.plateMaxC) tally.plateMaxC = loop.arrayC;
-            if (state.locked)
-              tally.bookUnused(areaM2, absorbedWm2, loop.a1, plan.array.a2, bottomC - outdoorC, dt);
+          if (sinkC < tally.coldestInletC) tally.coldestInletC = sinkC;
+        } else if (heatingKgPerS + preheatKgPerS + coilKgPerS > 0) {
+          flows.chargeLevel = 0;
+          store.predict();
+          store.correct();
+        } else store.rest();
+        if (mounted && !loop.full) {
+          loop.advanceEmpty();
+          tally.book(loop, areaM2 * absorbedWm2 * dt, 0);
+          if (loop.arrayC > tally.plateMaxC) tally.plateMaxC = loop.arrayC;
+          if (state.locked) {
+            tally.bookUnused(areaM2, absorbedWm2, loop.a1, plan.array.a2, sinkC - outdoorC, dt);
           }
         }
         if (heatingKgPerS > 0) storeHeatJ += heatingKgPerS * CP * (store.topMeanC - returnC) * dt;
-        if (preheatKgPerS > 0) {
-          tapHeatJ += preheatKgPerS * CP * flows.effectiveness * (store.topMeanC - mainsC) * dt;
-        }
+        if (preheatKgPerS + coilKgPerS > 0) tapHeatJ += store.tapW * dt;
         lossJ += store.lossJ;
         rest -= dt;
         subSteps++;
@@ -291,27 +313,29 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
 
       // what the store really gave, the backup on top of it, and the house
       const storeW = storeHeatJ / stepS;
+      const slabW = slabHeatJ / stepS;
       const tapStoreW = tapHeatJ / stepS;
       const tapBackupW = Math.min(ratedW, Math.max(0, tapLoadW - tapStoreW));
       const tapShortW = Math.max(0, tapLoadW - tapStoreW - tapBackupW);
       const backupW = Math.min(Math.max(0, ratedW - tapBackupW), Math.max(0, demandW - storeW));
       const givenW = storeW + backupW;
       storeLossW = lossJ / stepS;
-      let downwardW = 0;
-      if (storeInside) {
-        // the free response was worked with the store's loss of the step before
-        network.drive(outdoorC, outdoorC, gainToAir + storeLossW, gainToSurface, gainToMass);
+      let downwardW = plan.floorDownward * slabW;
+      slabSunW = slabW - downwardW;
+      if (storeInside || toSlab) {
+        const inside = storeInside ? storeLossW : 0;
+        network.drive(outdoorC, outdoorC, gainToAir + inside, gainToSurface, gainToMass, slabSunW);
         network.solve();
       }
       if (givenW > 0 && demandW > 0) {
         const share = givenW / demandW;
         network.add(plan.ideal ? givenW : share * duty);
-        if (!plan.ideal) downwardW = givenW - share * duty * (floorW + radiatorW);
+        if (!plan.ideal) downwardW += givenW - share * duty * (floorW + radiatorW);
       }
       network.advance();
       const lacking = heatingAllowed ? roomSetC - HALF_BAND_K - 1e-6 - network.airC : 0;
       const unmetW = tapShortW + (lacking > 0 ? lacking * plan.staticLossWPerK : 0);
-      storeSum += storeW;
+      storeSum += storeW + slabW;
       tapStoreSum += tapStoreW;
       backupSum += backupW;
       tapBackupSum += tapBackupW;
@@ -353,4 +377,24 @@ function radiatorConductance(table: Float64Array, excessK: number): number {
   const step = Math.floor(position);
   const share = position - step;
   return table[step]! * (1 - share) + table[step + 1]! * share;
+}
+
+/**
+ * Tap water through a coil, less than the whole draw when the mixing valve adds cold water to hold the tap's set
+ * temperature: the flow whose outlet, mixed, gives the wanted heat, by repeated substitution.
+ */
+function coilFlow(
+  store: StoreLayers,
+  tapKgPerS: number,
+  mainsC: number,
+  setC: number,
+  coilWPerK: number,
+): number {
+  let flow = tapKgPerS;
+  for (let round = 0; round < COIL_ROUNDS; round++) {
+    const outletC = store.coilOutletC(Math.exp(-coilWPerK / (store.count * flow * CP)), mainsC);
+    if (outletC <= setC) return flow;
+    flow = (tapKgPerS * (setC - mainsC)) / (outletC - mainsC);
+  }
+  return flow;
 }

@@ -24,6 +24,10 @@ describe('100 forced fills and drains without sun or loss', () => {
         pipeCapacityJPerK: 8800,
         pipeLossWPerK: 0,
         flowKgPerS: 0.26,
+        handover: 1,
+        ownVessel: false,
+        vesselLossWPerK: 0,
+        vesselRoomC: 20,
         startK: 7,
         stopK: 2,
         inhibitC: 95,
@@ -51,7 +55,11 @@ describe('100 forced fills and drains without sun or loss', () => {
     store.t[0] = 40;
     const loop = new ArrayLoop({
       areaM2: 1, a2: 0, dryCapacityJPerK: 1, waterKg: 0, pipeCapacityJPerK: 10_000, pipeLossWPerK: 1,
-      flowKgPerS: 0.01, startK: 7, stopK: 2, inhibitC: 95, minimumRunS: 60,
+      flowKgPerS: 0.01, handover: 1,
+    ownVessel: false,
+    vesselLossWPerK: 0,
+    vesselRoomC: 20,
+    startK: 7, stopK: 2, inhibitC: 95, minimumRunS: 60,
     }); // prettier-ignore
     loop.pipeC = 0;
     loop.arrayC = 50;

@@ -14,11 +14,13 @@ export const [upland, lowland] = climates.map((climate) => climate.weatherYear()
 export interface Change {
   cover?: Collector['cover'];
   array?: Partial<Design['array']>;
+  loop?: Partial<Design['loop']>;
   controller?: Partial<Design['controller']>;
   store?: Partial<Design['store']>;
   supply?: Partial<Design['supply']>;
   house?: Partial<House>;
   hotWater?: Partial<House['hotWater']>;
+  backup?: Partial<House['backup']>;
   numerics?: Partial<Numerics>;
   weather?: SimulationInput['weather'];
 }
@@ -29,10 +31,16 @@ export function example(change: Change = {}): SimulationInput {
   const design: Design = designs[0]!;
   return {
     weather: change.weather ?? upland,
-    house: { ...house, ...change.house, hotWater: { ...house.hotWater, ...change.hotWater } },
+    house: {
+      ...house,
+      ...change.house,
+      hotWater: { ...house.hotWater, ...change.hotWater },
+      backup: { ...house.backup, ...change.backup },
+    },
     design: {
       collector: change.cover ? collectorByCover[change.cover] : design.collector,
       array: { ...design.array, mountedMonths: Array<boolean>(12).fill(true), ...change.array },
+      loop: { ...design.loop, ...change.loop },
       controller: { ...design.controller, ...change.controller },
       store: { ...design.store, ...change.store },
       supply: { ...design.supply, ...change.supply },

@@ -65,7 +65,7 @@ function columnsOf(weather: WeatherYear, cover: (typeof COVERS)[number]): PlanCo
   const design = demonstration.designs[0]!;
   return builder.plan({
     weather,
-    house: demonstration.house,
+    house: { ...demonstration.house, horizon: [] },
     design: {
       ...design,
       collector: collectorByCover[cover],

@@ -45,6 +45,10 @@ export function runStandardSystem(system: StandardSystem): { loadJ: number; sola
     pipeCapacityJPerK: 0,
     pipeLossWPerK: 0,
     flowKgPerS: FLOW_KG_PER_S_M2 * areaM2,
+    handover: 1,
+    ownVessel: false,
+    vesselLossWPerK: 0,
+    vesselRoomC: 20,
     startK: 3,
     stopK: 0.5,
     inhibitC: 1000,
@@ -75,7 +79,7 @@ function runHour(loop: ArrayLoop, store: StoreLayers, loadW: number, exchangerWP
   let given = 0;
   let rest = SECONDS_PER_HOUR;
   while (rest > NOTHING_LEFT_S) {
-    loop.bottomC = store.bottomC;
+    loop.sinkC = store.bottomC;
     const hot = store.topC > RELIEF_C;
     if (loop.full && (hot || loop.wantsStop())) loop.drain(store);
     if (loop.full) {
@@ -109,7 +113,7 @@ function advance(loop: ArrayLoop, store: StoreLayers): void {
     loop.findCharge();
     flows.chargeC = flows.firstChargeC = loop.chargeC;
     store.predict();
-    loop.shiftBottom(store.bottomMeanC);
+    loop.shiftSink(store.bottomMeanC);
     loop.findCharge();
     flows.chargeC = loop.chargeC;
     store.correct();
