@@ -55,7 +55,8 @@ export function arithmeticExcess(supplyC: number, returnC: number, roomC: number
  * @param capacityFlowWPerK C = ṁ cp [W/K] from 0
  * @param roomC θi [°C]
  * @returns heat to the room [W]; 0 when the supply is not above the room
- * @remarks arithmetic mean excess also at wide spreads, where the logarithmic mean would give less
+ * @remarks arithmetic mean excess also at wide spreads, where the logarithmic mean would give less; never more than
+ * what cools the water to the room, which the arithmetic mean would allow where the flow is small for the radiator
  * @see EN 442-2:2014; energy balance of the water
  */
 export function radiatorHeat(
@@ -75,7 +76,7 @@ export function radiatorHeat(
     excess -= change;
     if (change < 1e-10 * most) break;
   }
-  return ratedW * (excess / RATED_EXCESS_K) ** exponent;
+  return Math.min(ratedW * (excess / RATED_EXCESS_K) ** exponent, capacityFlowWPerK * most);
 }
 
 /**

@@ -269,7 +269,12 @@ export class PlanBuilder {
       ideal,
       loopKgPerS: loop.loopKgPerS,
       floorWPerK: hasFloor
-        ? supplyToSlabConductance(floor.areaM2, loop.floorKH, Math.max(NO_FLOW, loop.floorKgPerS) * CP)
+        ? supplyToSlabConductance(
+            floor.areaM2,
+            loop.floorKH,
+            // the rest of the water's heat goes down
+            (1 - floor.downwardLoss) * Math.max(NO_FLOW, loop.floorKgPerS) * CP,
+          )
         : 0,
       floorKH: loop.floorKH,
       floorAreaM2: hasFloor ? floor.areaM2 : 0,
@@ -401,9 +406,9 @@ function handover(
   if (layout === 'through the store') return 1;
   if (layout === 'vessel with exchanger') return exchangerEffectiveness;
   if (house.floorAreaM2 <= 0 || flowKgPerS <= 0) return GREATEST_HANDOVER;
-  const flowWPerK = flowKgPerS * CP;
-  const up = supplyToSlabConductance(house.floorAreaM2, house.floorKH, flowWPerK);
-  return Math.min(GREATEST_HANDOVER, up / ((1 - house.floorDownward) * flowWPerK));
+  const upWPerK = (1 - house.floorDownward) * flowKgPerS * CP;
+  const up = supplyToSlabConductance(house.floorAreaM2, house.floorKH, upWPerK);
+  return Math.min(GREATEST_HANDOVER, up / upWPerK);
 }
 
 /** Flow and electric power of the running pump: the flow is given, or follows from its curve against lift and pipes. */

@@ -32,6 +32,19 @@ describe('heated floor in steady state, film fixed at 10.8 W/(m²K)', () => {
     },
   );
 
+  it('with 30 % going down the return is colder, and q = K_H ΔθH still holds for the heat that goes up (EN 1264-3)', () => {
+    const kH = floorConductance(150, 45, 1.2, 0.05);
+    const up = 1 - 0.3;
+    for (const capacityFlow of [150, 600, 2500]) {
+      const toSlab = supplyToSlabConductance(AREA, kH, up * capacityFlow);
+      const heat = (SUPPLY_C - ROOM_C) / (1 / toSlab + 1 / (FLOOR_FILM_W_PER_M2K * AREA));
+      const returnC = SUPPLY_C - heat / up / capacityFlow;
+      expect(returnC).toBeGreaterThan(ROOM_C);
+      const expected = kH * AREA * logarithmicExcess(SUPPLY_C, returnC, ROOM_C);
+      expect(Math.abs(heat / expected - 1)).toBeLessThan(1e-6);
+    }
+  });
+
   it.each(cases)(
     'spacing $spacing mm, covering $covering: water, slab and film in series are K_H',
     (floor) => {

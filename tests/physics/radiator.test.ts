@@ -13,11 +13,19 @@ describe('radiator on a loop (EN 442-2)', () => {
       for (const supplyC of [20.01, 25, 35, 55, 80]) {
         for (const capacityFlow of [2, 20, 200, 5000]) {
           const heat = radiatorHeat(6000, exponent, supplyC, capacityFlow, 20);
+          const most = capacityFlow * (supplyC - 20);
+          expect(heat).toBeLessThanOrEqual(most);
+          if (heat === most) continue;
           const mean = (supplyC + loopReturnC(supplyC, heat, capacityFlow)) / 2;
           expect(Math.abs(heat - 6000 * radiatorFactor(mean - 20, exponent))).toBeLessThan(1e-6 * (1 + heat));
         }
       }
     }
+  });
+
+  it('cools its water no further than to the room, however small the flow', () => {
+    const heat = radiatorHeat(38_000, 1.3, 45, 20, 20);
+    expect(loopReturnC(45, heat, 20)).toBe(20);
   });
 
   it('rises with supply and flow, and never cools a room', () => {
