@@ -26,6 +26,13 @@ const house = houseSchema.parse({
     { name: 'Street', areaM2: 5.1, azimuthDeg: 12, gValue: 0.7, shade: 0.6 },
     { name: 'Gables, together', areaM2: 10.9, azimuthDeg: 102, gValue: 0.7, shade: 0.45 },
   ],
+  // the hill to the south-east
+  horizon: [
+    { azimuthDeg: 95, altitudeDeg: 0 },
+    { azimuthDeg: 120, altitudeDeg: 9 },
+    { azimuthDeg: 150, altitudeDeg: 9 },
+    { azimuthDeg: 175, altitudeDeg: 0 },
+  ],
   emitters: { floor: {}, radiators: {} },
   hotWater: {},
   backup: {},

@@ -47,6 +47,8 @@ export const STAGNATION_IRRADIANCE_WM2 = 1000;
 export const STAGNATION_AIR_C = 30;
 
 const LEAST_SHARE_OF_A1 = 0.3;
+/** Excess of a low-temperature collector over outdoor air at which the folded a8 loses what it should [K]. */
+const FOLD_EXCESS_K = 40;
 
 /**
  * Linear loss at the wind of the hour: a1 + a3 (u − 3), not below 0.3 a1.
@@ -59,6 +61,20 @@ const LEAST_SHARE_OF_A1 = 0.3;
  */
 export function linearLoss(a1: number, a3: number, windMPerS: number): number {
   return Math.max(LEAST_SHARE_OF_A1 * a1, a1 + a3 * (windMPerS - REFERENCE_WIND_M_PER_S));
+}
+
+/**
+ * Quadratic loss with the fourth-power term folded in: a2 + a8 Δr², Δr = 40 K.
+ * @param a2 quadratic loss [W/(m²K²)] from 0
+ * @param a8 fourth-power loss [W/(m²K⁴)] 0–1e-6; 0 for nearly all collectors below 100 °C
+ * @returns quadratic loss that loses the same at an excess of 40 K [W/(m²K²)]
+ * @remarks The year follows the exact root of a quadratic, in which Δ⁴ has no place. The fold errs by
+ *   a8 Δ² (Δr² − Δ²): at most 0.25 a8 Δr⁴ too much below 40 K (0.006 W/m² for a8 = 1e-8), and too little above
+ *   (0.3 W/m² at 80 K). `steadyPower` takes the term as it stands.
+ * @see ISO 9806:2017, 23, quasi-dynamic equation (from memory); the fold is the product's own
+ */
+export function quadraticLoss(a2: number, a8: number): number {
+  return a2 + a8 * FOLD_EXCESS_K ** 2;
 }
 
 /**

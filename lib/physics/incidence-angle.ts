@@ -5,7 +5,7 @@ const HEMISPHERE_STEPS = 1800;
 const PAIR_STEPS = 90;
 
 /** How ribs, webs or tubes of a collector lie when it is mounted. */
-export const RIBS = ['along the slope', 'across the slope'] as const;
+export type Ribs = 'along the slope' | 'across the slope';
 
 /** How the acceptance of beam irradiance falls with its angle. */
 export type IncidenceModifier =
@@ -18,7 +18,7 @@ export type IncidenceModifier =
       kind: 'pair';
       longitudinal: readonly number[];
       transversal: readonly number[];
-      ribs: (typeof RIBS)[number];
+      ribs: Ribs;
     };
 
 /**
