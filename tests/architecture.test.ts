@@ -58,6 +58,7 @@ const PLANTED: [string, string, string][] = [
     'core-stands-alone',
   ],
   ['lib/simulation/planted-economics.ts', "import '@/lib/economics/planted-plain';", 'simulation-one-way'],
+  ['lib/calibration/planted-weather.ts', "import '@/lib/weather/seeded-random';", 'calibration-one-way'],
   ['lib/sun/planted-mathjs.ts', "import 'mathjs';", 'sun-only-suncalc'],
   ['lib/testbench/planted-suncalc.ts', "import 'suncalc';", 'mathjs-only-where-said'],
   ['lib/weather/planted-server.ts', "import '@/lib/server/env';", 'core-stands-alone'],

@@ -3,7 +3,7 @@ import path from 'node:path';
 import ts from 'typescript';
 import { describe, expect, it } from 'vitest';
 
-const ROOMS = ['physics', 'sun', 'weather', 'economics'];
+const ROOMS = ['physics', 'sun', 'weather', 'calibration', 'economics'];
 const ROOT = path.join(import.meta.dirname, '..', 'lib');
 
 interface Documented {

@@ -1,4 +1,5 @@
 import { buildingRows } from './building-rows';
+import { calibrationRows } from './calibration-rows';
 import { collectorRows } from './collector-rows';
 import { emitterRows } from './emitter-rows';
 import { houseRows } from './house-rows';
@@ -18,6 +19,7 @@ export const referenceRows: readonly ReferenceRow[] = [
   ...buildingRows,
   ...houseRows,
   ...moneyRows,
+  ...calibrationRows,
   ...sunRows,
   ...systemRows,
 ];
