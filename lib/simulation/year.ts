@@ -327,7 +327,8 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
         network.drive(outdoorC, outdoorC, gainToAir + inside, gainToSurface, gainToMass, slabSunW);
         network.solve();
       }
-      if (givenW > 0 && demandW > 0) {
+      // also when a coil has drawn the top below the return: what the loop loses is booked, not forgotten
+      if (givenW !== 0 && demandW > 0) {
         const share = givenW / demandW;
         network.add(plan.ideal ? givenW : share * duty);
         if (!plan.ideal) downwardW += givenW - share * duty * (floorW + radiatorW);
