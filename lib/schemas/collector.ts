@@ -295,7 +295,7 @@ export const collectorPartSchema = z.object({
     step: 1,
     default: 110,
     origin: 'handbook',
-    source: 'data/materials',
+    source: 'table of materials, low end',
     help: 'Highest temperature that the part bears for years.',
   }),
   shortTermLimitC: quantity({
@@ -306,7 +306,7 @@ export const collectorPartSchema = z.object({
     step: 1,
     default: 140,
     origin: 'handbook',
-    source: 'data/materials',
+    source: 'table of materials, low end',
     help: 'Highest temperature that the part bears for hours.',
   }),
 });

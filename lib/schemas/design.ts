@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { LAYOUTS, type Design } from '@/lib/simulation/design';
+import type { Design } from '@/lib/simulation/design';
 import { collectorSchema } from './collector';
 import { quantity, shortName } from './quantity';
 
@@ -47,6 +47,7 @@ export const arraySchema = z.object({
     origin: 'assumed',
     source: 'one row; on a roof or wall none shades another',
     help: 'Equal rows behind one another on level ground. Each shades the next while the sun is low.',
+    whole: true,
   }),
   rowSpacingM: quantity({
     label: 'Row to row',
@@ -54,9 +55,9 @@ export const arraySchema = z.object({
     min: 0.5,
     max: 20,
     step: 0.1,
-    default: 5,
+    default: 6,
     origin: 'assumed',
-    source: 'clears the shadow of 2 m rows at 65° and 46° north at noon in December, nearly',
+    source: 'clears 2 m rows at 65° and 46° north at noon of the shortest day',
     help: 'From front edge to front edge. Read with two rows or more.',
   }),
   rowHeightM: quantity({
@@ -165,10 +166,13 @@ export const arraySchema = z.object({
 });
 
 export const loopSchema = z.object({
-  layout: z.enum(LAYOUTS).default('through the store').meta({
-    label: 'Layout',
-    help: 'Store water through the array; a separate drain-back vessel with an exchanger to the store; or no store, the array heats the floor slab.',
-  }),
+  layout: z
+    .enum(['through the store', 'vessel with exchanger', 'straight to the slab'])
+    .default('through the store')
+    .meta({
+      label: 'Layout',
+      help: 'Store water through the array; a separate drain-back vessel with an exchanger to the store; or no store, the array heats the floor slab.',
+    }),
   exchangerEffectiveness: quantity({
     label: 'Loop exchanger',
     unit: '',
@@ -215,13 +219,10 @@ export const loopSchema = z.object({
   }),
   pump: z
     .object({
-      kind: z
-        .enum(['flow', 'curve'])
-        .default('flow')
-        .meta({
-          label: 'Flow from',
-          help: 'The specific flow above, or the pump’s curve against lift and pipes.',
-        }),
+      kind: z.enum(['flow', 'curve']).default('flow').meta({
+        label: 'Flow from',
+        help: 'The specific flow above, or the pump’s curve against lift and pipes.',
+      }),
       shutOffHeadM: quantity({
         label: 'Head at no flow',
         unit: 'm',
@@ -347,6 +348,7 @@ export const storeSchema = z.object({
     origin: 'assumed',
     source: 'a model parameter, printed with every result',
     help: 'Equal layers in which the store is computed.',
+    whole: true,
   }),
   insulationMm: quantity({
     label: 'Insulation',

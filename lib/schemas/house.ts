@@ -270,13 +270,10 @@ export const hotWaterSchema = z.object({
     source: 'EN 12976-2, annex B',
     help: 'Half the difference of warmest and coldest mains water.',
   }),
-  exchanger: z
-    .enum(['plate', 'coil'])
-    .default('plate')
-    .meta({
-      label: 'Preheated by',
-      help: 'A plate exchanger fed from the top of the store, or a coil that rises through it.',
-    }),
+  exchanger: z.enum(['plate', 'coil']).default('plate').meta({
+    label: 'Preheated by',
+    help: 'A plate exchanger fed from the top of the store, or a coil that rises through it.',
+  }),
   coilWPerK: quantity({
     label: 'Coil',
     unit: 'W/K',
@@ -386,6 +383,7 @@ export const setbackSchema = z.object({
     origin: 'common practice',
     source: 'no source',
     help: 'Hour of the day, local standard time.',
+    whole: true,
   }),
   toHour: quantity({
     label: 'Night until',
@@ -397,6 +395,7 @@ export const setbackSchema = z.object({
     origin: 'common practice',
     source: 'no source',
     help: 'Hour of the day, local standard time; the same hour as “from” means no night.',
+    whole: true,
   }),
 });
 

@@ -19,6 +19,7 @@ export const pricesSchema = z.object({
     origin: 'typed',
     source: demo,
     help: 'The year whose prices these are.',
+    whole: true,
   }),
   fuelPerKwh: quantity({
     label: 'Fuel',
@@ -195,6 +196,7 @@ export const pricesSchema = z.object({
     origin: 'assumed',
     source: demo,
     help: 'Horizon of the cost of heat.',
+    whole: true,
   }),
 });
 

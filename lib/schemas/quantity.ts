@@ -69,19 +69,22 @@ export interface QuantityMeta {
   /** standard, table or reason behind the default */
   source: string;
   help: string;
+  /** only whole numbers */
+  whole?: boolean;
 }
 
 /** The sentence that a form shows when a number does not fit: what to type instead. */
 export function quantityHint(meta: QuantityMeta): string {
   const unit = meta.unit && !meta.unit.startsWith('money') ? ` ${meta.unit}` : '';
-  return `${meta.label}: type ${meta.min} to ${meta.max}${unit}.`;
+  const whole = meta.whole ? 'a whole number from ' : '';
+  return `${meta.label}: type ${whole}${meta.min} to ${meta.max}${unit}.`;
 }
 
 /** A bounded number with its label, unit, default, origin and help. */
 export function quantity(meta: QuantityMeta) {
   const error = quantityHint(meta);
-  return z
-    .number({ error })
+  const number = meta.whole ? z.number({ error }).int({ error }) : z.number({ error });
+  return number
     .min(meta.min, { error })
     .max(meta.max, { error })
     .default(meta.default)

@@ -126,8 +126,7 @@ export interface Controller {
 }
 
 /** How array, store and floor hang together. */
-export const LAYOUTS = ['through the store', 'vessel with exchanger', 'straight to the slab'] as const;
-export type Layout = (typeof LAYOUTS)[number];
+export type Layout = 'through the store' | 'vessel with exchanger' | 'straight to the slab';
 
 export interface Loop {
   layout: Layout;
