@@ -88,7 +88,10 @@ else if (flags.has('--example')) {
       sunShiftH: weather.sunShiftH,
       notes: weather.notes,
     },
-    planeSums: planeSums(weather, file.design.array),
+    planeSums: planeSums(weather, file.design.array, {
+      horizon: file.house.horizon,
+      rows: file.design.array,
+    }),
     ...result,
     cost: designCost(file.design, file.prices, outcome.result),
     findings: findings({ house: file.house, design: file.design, result: outcome.result }),

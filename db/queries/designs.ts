@@ -1,7 +1,8 @@
 import { sql } from 'kysely';
 import type { Kysely } from 'kysely';
-import type { DesignRecord } from '@/lib/schemas/design';
+import { designSchema, type DesignRecord } from '@/lib/schemas/design';
 import type { Database } from '../schema';
+import { upToDate } from './up-to-date';
 
 /** Appends a design to the project's. */
 export function insertDesign(db: Kysely<Database>, projectId: string, design: DesignRecord) {
@@ -19,25 +20,27 @@ export function insertDesign(db: Kysely<Database>, projectId: string, design: De
     .executeTakeFirstOrThrow();
 }
 
-export function listDesigns(db: Kysely<Database>, projectId: string) {
-  return db
+export async function listDesigns(db: Kysely<Database>, projectId: string) {
+  const rows = await db
     .selectFrom('design')
     .select(['id', 'name', 'data', 'version'])
     .where('project_id', '=', projectId)
     .orderBy('position')
     .orderBy('created_at')
     .execute();
+  return rows.map((row) => ({ ...row, data: upToDate(designSchema, row.data) }));
 }
 
 /** The design, if its project is the owner's. */
-export function findDesign(db: Kysely<Database>, designId: string, ownerId: string) {
-  return db
+export async function findDesign(db: Kysely<Database>, designId: string, ownerId: string) {
+  const row = await db
     .selectFrom('design')
     .innerJoin('project', 'project.id', 'design.project_id')
     .selectAll('design')
     .where('design.id', '=', designId)
     .where('project.owner_id', '=', ownerId)
     .executeTakeFirst();
+  return row && { ...row, data: upToDate(designSchema, row.data) };
 }
 
 /** Writes the design when nobody has since the given version; undefined otherwise. */

@@ -1,13 +1,15 @@
 import type { Kysely } from 'kysely';
-import type { HouseRecord } from '@/lib/schemas/house';
+import { houseSchema, type HouseRecord } from '@/lib/schemas/house';
 import type { Database } from '../schema';
+import { upToDate } from './up-to-date';
 
-export function findHouse(db: Kysely<Database>, projectId: string) {
-  return db
+export async function findHouse(db: Kysely<Database>, projectId: string) {
+  const row = await db
     .selectFrom('house')
     .select(['data', 'version'])
     .where('project_id', '=', projectId)
     .executeTakeFirstOrThrow();
+  return { ...row, data: upToDate(houseSchema, row.data) };
 }
 
 /** Writes the house when nobody has since the given version; undefined otherwise. */

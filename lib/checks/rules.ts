@@ -2,6 +2,7 @@ import { FLOOR_LIMITS } from '@/lib/physics/floor';
 import type { PartDryness } from '@/lib/simulation/results';
 import { pumpDuty } from '@/lib/simulation/build-plan';
 import { emitterLoop, houseHeat } from '@/lib/simulation/house-heat';
+import { shortestNoonShadow } from '@/lib/sun/row-shading';
 import { formatFixed, formatShare, formatSignificant, withUnit } from '@/lib/units/display';
 import { DAYS_IN_MONTH, HOURS_PER_DAY, SECONDS_PER_HOUR } from '@/lib/units/constants';
 import type { CheckSubject } from './findings';
@@ -315,6 +316,34 @@ export const RULES: readonly Rule[] = [
         house.hotWater.litresPerDay > 0 && house.hotWater.setC > 45,
         () =>
           `Tap at ${celsius(house.hotWater.setC)}: a thermostatic mixing valve is needed; ${celsius(45)} at most where children, old or ill people wash.`,
+      ),
+  },
+  {
+    id: 'A4',
+    severity: 'caution',
+    where: 'array',
+    source: 'geometry of infinitely long rows at solar noon of the shortest day, level horizon',
+    judge: ({ design, result }) => {
+      const { array } = design;
+      if (array.areaM2 <= 0 || array.rows <= 1) return [];
+      const { shaded, clearSpacingM } = shortestNoonShadow(array, array, result.year.latitudeDeg);
+      return when(
+        shaded >= 0.01,
+        () =>
+          `At noon of the shortest day each row shades ${formatShare(shaded)} of the next. ${withUnit(formatFixed(clearSpacingM, 1), 'm')} from front edge to front edge would clear it; now ${withUnit(formatFixed(array.rowSpacingM, 1), 'm')}.`,
+      );
+    },
+  },
+  {
+    id: 'A5',
+    severity: 'note',
+    where: 'house',
+    source: 'common practice, no source',
+    judge: ({ house, design }) =>
+      when(
+        design.array.areaM2 > 0 && house.horizon.length === 0,
+        () =>
+          'No horizon is entered: the sky is taken as open all round. A hill, house or trees to the south cost winter sun.',
       ),
   },
   {

@@ -62,6 +62,7 @@ export function assembleResult(
       floorMaxC: largest(columns.floorSurfaceC),
       floorHeatedMaxC: largestWhile(columns.floorSurfaceC, columns.supplyC),
       southern: input.weather.latitudeDeg < 0,
+      latitudeDeg: input.weather.latitudeDeg,
       storeMaxC: largest(columns.storeTopC),
       plateMaxC: tally.plateMaxC,
       coldestInletC: tally.coldestInletC,

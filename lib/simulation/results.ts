@@ -128,6 +128,8 @@ export interface YearTotals extends EnergyRow {
   floorHeatedMaxC: number;
   /** weather year of the southern half of the Earth */
   southern: boolean;
+  /** of the weather year, north positive [°] */
+  latitudeDeg: number;
   storeMaxC: number;
   /** highest plate temperature that the run itself reached (not the dry temperature) */
   plateMaxC: number;

@@ -52,6 +52,7 @@ export function inventedAnswer(design: DesignRecord, figures: InventedFigures): 
     floorMaxC: 26,
     floorHeatedMaxC: 26,
     southern: false,
+    latitudeDeg: 46,
     coldestInletC: 15,
     storeMaxC: 60,
     plateMaxC: 80,

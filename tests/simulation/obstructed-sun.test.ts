@@ -144,7 +144,7 @@ describe('records from before these fields', () => {
     expect(horizon).toHaveLength(4);
     expect(houseSchema.parse(house).horizon).toEqual([]);
     const { rows, rowSpacingM, rowHeightM, ...array } = demonstration.designs[0].array;
-    expect([rows, rowSpacingM, rowHeightM]).toEqual([1, 5, 2]);
+    expect([rows, rowSpacingM, rowHeightM]).toEqual([1, 6, 2]);
     expect(arraySchema.parse(array).rows).toBe(1);
     const { modifier, a7, a8, ...curve } = demonstration.designs[0].collector.curve;
     expect([modifier, a7, a8]).toEqual([{ kind: 'b0' }, 0, 0]);
