@@ -1,5 +1,6 @@
 import type { Metadata, Viewport } from 'next';
 import type { ReactNode } from 'react';
+import { SiteFoot } from '@/components/site-foot';
 import { SiteHead } from '@/components/site-head';
 import { fontVariables } from './fonts';
 import './globals.css';
@@ -35,6 +36,7 @@ export default function RootLayout({ children }: Readonly<{ children: ReactNode 
           <main id="main" tabIndex={-1} className="pb-10">
             {children}
           </main>
+          <SiteFoot />
         </div>
       </body>
     </html>

@@ -11,7 +11,10 @@ export function SiteNav() {
   const pathname = usePathname();
   if (WITHOUT.some((start) => pathname.startsWith(start))) return null;
   return (
-    <nav aria-label="Main" className="ml-auto">
+    <nav aria-label="Main" className="ml-auto flex flex-wrap gap-x-6">
+      <Link href="/method" className="inline-flex min-h-9 items-center">
+        How it computes
+      </Link>
       <Link href="/sign-in" className="inline-flex min-h-9 items-center">
         Sign in
       </Link>

@@ -12,9 +12,9 @@ const DOORS = [
   },
   {
     title: 'I design the system',
-    text: 'Every number opens its equation, its inputs and their values. Dry temperatures, balance, receipt.',
-    link: 'Open the demonstration',
-    href: '/demonstration?design=twin-wall-rows-all-year',
+    text: 'Every number opens its equation, its inputs and their values; each equation has its source and its checks.',
+    link: 'See how it computes',
+    href: '/method',
   },
   {
     title: 'I advise',

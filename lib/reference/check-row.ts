@@ -29,3 +29,16 @@ export function checkRow(row: ReferenceRow): CheckedValue[] {
     return { name, expected, computed, tolerance, residual, within: Math.abs(residual) <= tolerance };
   });
 }
+
+/** A check with its outcome: plain data, for tables and workers. */
+export interface CheckedRow extends Pick<ReferenceRow, 'id' | 'title' | 'source' | 'provenance' | 'tier'> {
+  values: CheckedValue[];
+  within: boolean;
+}
+
+/** Runs a check and keeps what a table prints of it. */
+export function checkedRow(row: ReferenceRow): CheckedRow {
+  const { id, title, source, provenance, tier } = row;
+  const values = checkRow(row);
+  return { id, title, source, provenance, tier, values, within: values.every(({ within }) => within) };
+}
