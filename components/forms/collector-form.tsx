@@ -9,6 +9,7 @@ import { DryKindField } from './dry-kind-field';
 import { Field } from './field';
 import { FieldRow, FormSection } from './form-section';
 import { GenericStart } from './generic-start';
+import { ModifierFields } from './modifier-fields';
 import { RowTable } from './row-table';
 import { SchemaForm } from './schema-form';
 import type { SaveAnswer, Stored } from './use-saving';
@@ -25,6 +26,8 @@ const CURVE = [
   'a3',
   'a4',
   'a6',
+  'a7',
+  'a8',
   'dryCapacityJPerM2K',
   'waterContentLPerM2',
 ].map((field) => `collector.curve.${field}`);
@@ -116,6 +119,7 @@ export function CollectorForm({ designId, stored, currency, save, frieze }: Coll
             <Field key={path} path={path} />
           ))}
         </FieldRow>
+        <ModifierFields />
       </FormSection>
       <FormSection id="dry" title="Empty in the sun">
         <DryFields />

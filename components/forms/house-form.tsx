@@ -29,6 +29,7 @@ const CONTENTS: readonly ContentsEntry[] = [
   { id: 'air', title: 'Air change', fields: ['airChangePerH', 'windowOpening'] },
   { id: 'shell', title: 'The shell', fields: ['shell'] },
   { id: 'windows', title: 'Windows and gains', fields: ['windows'] },
+  { id: 'horizon', title: 'Horizon', fields: ['horizon'] },
   { id: 'emitters', title: 'Emitters', fields: ['emitters'] },
   { id: 'hot-water', title: 'Hot water', fields: ['hotWater'] },
   { id: 'backup', title: 'Backup', fields: ['backup'] },
@@ -41,6 +42,11 @@ const WINDOW_COLUMNS = [
   { field: 'gValue', track: '4.5rem' },
   { field: 'shade', track: '4.5rem' },
   { field: 'frameFraction', track: '4.5rem' },
+];
+
+const HORIZON_COLUMNS = [
+  { field: 'azimuthDeg', track: '6rem' },
+  { field: 'altitudeDeg', track: '6rem' },
 ];
 
 interface HouseFormProps {
@@ -93,6 +99,19 @@ export function HouseForm({ projectId, stored, currency, save, frieze }: HouseFo
           columns={WINDOW_COLUMNS}
           addWord="Add windows"
           originField="gValue"
+        />
+      </FormSection>
+      <FormSection id="horizon" title="Horizon">
+        <p className="max-w-prose">
+          The skyline as the array sees it: straight lines from point to point, all round. Trees count as they
+          stand in January. Without points the sky is open.
+        </p>
+        <RowTable
+          path="horizon"
+          caption="Points of the skyline"
+          columns={HORIZON_COLUMNS}
+          addWord="Add a point"
+          originField="altitudeDeg"
         />
       </FormSection>
       <FormSection id="emitters" title="Floor and radiators">

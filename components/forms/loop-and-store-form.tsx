@@ -32,6 +32,9 @@ const CONTENTS: readonly ContentsEntry[] = [
       'array.areaM2',
       'array.tiltDeg',
       'array.azimuthDeg',
+      'array.rows',
+      'array.rowSpacingM',
+      'array.rowHeightM',
       'array.mountedMonths',
       'array.windFactor',
     ],
@@ -116,6 +119,9 @@ export function LoopAndStoreForm({ designId, stored, currency, save, frieze }: L
           <Field path="array.areaM2" />
           <Field path="array.tiltDeg" />
           <Field path="array.azimuthDeg" />
+          <Field path="array.rows" />
+          <Field path="array.rowSpacingM" />
+          <Field path="array.rowHeightM" />
           <Field path="array.windFactor" />
         </FieldRow>
         <MonthsField path="array.mountedMonths" />

@@ -50,7 +50,8 @@ function RowOrigin({ path }: { path: string }) {
   return <OriginMark origin={origin} word={origin === 'typed' ? 'typed by you' : meta.source} />;
 }
 
-function CellError({ path }: { path: string }) {
+/** What is wrong with a cell, in words below its row. */
+export function CellError({ path }: { path: string }) {
   const { schema } = useFormKnowledge();
   const meta = quantityMeta(schemaAt(schema, path));
   const message = useFieldError(path);
