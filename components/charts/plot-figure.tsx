@@ -9,6 +9,13 @@ interface PlotFigureProps {
   height: number;
 }
 
+/** A chart is one picture with one name: the library's names for its groups mean nothing to those who listen. */
+function asOneImage(chart: Element): Element {
+  chart.setAttribute('role', 'img');
+  chart.querySelectorAll('g[aria-label]').forEach((group) => group.removeAttribute('aria-label'));
+  return chart;
+}
+
 /** Draws one chart; the library comes with the first of them. */
 export function PlotFigure({ load, height }: PlotFigureProps) {
   const roomRef = useRef<HTMLDivElement>(null);
@@ -21,7 +28,7 @@ export function PlotFigure({ load, height }: PlotFigureProps) {
     void Promise.all([import('@observablehq/plot'), load()]).then(([Plot, options]) => {
       if (gone) return;
       const draw = () => {
-        if (room.clientWidth > 0) room.replaceChildren(Plot.plot(options(room.clientWidth)));
+        if (room.clientWidth > 0) room.replaceChildren(asOneImage(Plot.plot(options(room.clientWidth))));
       };
       draw();
       const observer = new ResizeObserver(draw);

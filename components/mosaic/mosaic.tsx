@@ -119,15 +119,15 @@ export const Mosaic = memo(function Mosaic(props: MosaicProps) {
 
 function MonthNames({ order, firstDay }: { order: readonly number[]; firstDay: number }) {
   return (
-    <div className="relative col-start-2 h-5 font-display text-h3 italic max-sm:text-body" aria-hidden="true">
+    <div className="relative col-start-2 h-7 font-display text-h3 italic max-sm:text-body" aria-hidden="true">
       {order.map((month) => (
         <span
           key={month}
-          className="absolute bottom-0 leading-5"
+          className="absolute bottom-1.5 leading-5"
           style={{ left: `${(columnOfDay(MONTH_FIRST_DAY[month]!, firstDay) / DAYS_SHOWN) * 100}%` }}
         >
-          <span className="max-md:hidden">{MONTHS[month]}</span>
-          <span className="md:hidden">{MONTHS[month]!.slice(0, 3)}</span>
+          <span className="max-lg:hidden">{MONTHS[month]}</span>
+          <span className="lg:hidden">{MONTHS[month]!.slice(0, 3)}</span>
         </span>
       ))}
     </div>

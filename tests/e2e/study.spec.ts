@@ -128,6 +128,9 @@ for (const path of ['/', '/demonstration', '/demonstration/compare']) {
       await page.emulateMedia({ colorScheme });
       await page.goto(path);
       await expect(page.locator('canvas').first()).toBeVisible({ timeout: 30_000 });
+      if (path === '/demonstration') {
+        await expect(page.getByRole('img', { name: /Heat of each month/ })).toBeVisible({ timeout: 30_000 });
+      }
       await page.waitForTimeout(1500);
       const { violations } = await new AxeBuilder({ page }).analyze();
       expect(violations.map(({ id, nodes }) => [id, nodes.map(({ html }) => html)])).toEqual([]);
