@@ -1,4 +1,5 @@
 import type { ColumnType, Generated, Insertable, Selectable } from 'kysely';
+import type { BillsRecord } from '@/lib/schemas/bills';
 import type { CollectorRecord } from '@/lib/schemas/collector';
 import type { DesignRecord } from '@/lib/schemas/design';
 import type { HouseRecord } from '@/lib/schemas/house';
@@ -42,6 +43,12 @@ export interface ProjectTable {
 export interface HouseTable {
   project_id: string;
   data: Json<HouseRecord>;
+  version: Generated<number>;
+}
+
+export interface BillsTable {
+  project_id: string;
+  data: Json<BillsRecord>;
   version: Generated<number>;
 }
 
@@ -127,6 +134,7 @@ export interface Database {
   session: SessionTable;
   project: ProjectTable;
   house: HouseTable;
+  bills: BillsTable;
   weather_year: WeatherYearTable;
   collector: CollectorTable;
   design: DesignTable;

@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import { pathToFileURL } from 'node:url';
 import { sql, type Kysely, type Transaction } from 'kysely';
 import { climates } from '@/data/climates/climates';
+import { larkspurBills } from '@/data/demonstration/larkspur-bills';
 import { demonstration } from '@/data/demonstration/larkspur-house';
 import { hashPassword } from '@/lib/auth/password';
 import { encodeWeatherYear } from '@/lib/weather/packed-weather';
@@ -58,7 +59,16 @@ async function seedOwner(db: Transaction<Database>): Promise<Seeded> {
   if (!owner) return {};
   const { house, prices, designs, climateId } = demonstration;
   const weatherYearId = (await findClimateId(db, climateId)) ?? null;
-  await insertProject(db, { ownerId: owner.id, name: house.name, house, prices, designs, weatherYearId });
+  const bills = larkspurBills();
+  await insertProject(db, {
+    ownerId: owner.id,
+    name: house.name,
+    house,
+    bills,
+    prices,
+    designs,
+    weatherYearId,
+  });
   return chosen ? {} : { newOwner: { email: OWNER_EMAIL, password } };
 }
 

@@ -1,9 +1,11 @@
 import { sql } from 'kysely';
 import type { Kysely, Transaction } from 'kysely';
+import type { BillsRecord } from '@/lib/schemas/bills';
 import type { DesignRecord } from '@/lib/schemas/design';
 import type { HouseRecord } from '@/lib/schemas/house';
 import type { Prices } from '@/lib/schemas/prices';
 import type { Database } from '../schema';
+import { insertBills } from './bills';
 
 const now = sql<Date>`now()`;
 
@@ -11,6 +13,7 @@ export interface NewProject {
   ownerId: string;
   name: string;
   house: HouseRecord;
+  bills?: BillsRecord;
   prices: Prices;
   designs: readonly DesignRecord[];
   weatherYearId: string | null;
@@ -32,6 +35,7 @@ export async function insertProject(trx: Transaction<Database>, project: NewProj
     .insertInto('house')
     .values({ project_id: id, data: JSON.stringify(project.house) })
     .execute();
+  if (project.bills) await insertBills(trx, id, project.bills);
   const designs = project.designs.map((design, position) => ({
     project_id: id,
     data: JSON.stringify(design),

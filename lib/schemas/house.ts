@@ -399,6 +399,24 @@ export const setbackSchema = z.object({
   }),
 });
 
+export const calibrationSchema = z.object({
+  factor: quantity({
+    label: 'Loss by the bills',
+    unit: '',
+    min: 0.4,
+    max: 2,
+    step: 0.01,
+    default: 1,
+    origin: 'assumed',
+    source: 'the shell and the air change as entered',
+    help: 'Multiplies the loss through the shell and by air, so that the simulated house burns what its bills say.',
+  }),
+  basis: z
+    .enum(['as entered', 'bills'])
+    .default('as entered')
+    .meta({ label: 'Loss taken', help: 'As the shell is entered, or scaled to the fuel bills.' }),
+});
+
 export const houseSchema = z.object({
   name: shortName('House', 'House'),
   floorAreaM2: quantity({
@@ -435,6 +453,7 @@ export const houseSchema = z.object({
     source: 'n50/20; no source',
     help: 'Mean exchange of air with the outdoors.',
   }),
+  calibration: calibrationSchema.prefault({}),
   windows: z.array(windowGainSchema).max(20),
   horizon: z
     .array(horizonPointSchema)

@@ -50,6 +50,8 @@ export const UNITS = [
   'money/m²',
   'money/year',
   'money/h',
+  'kWh',
+  'kWh/year',
   'kWh/kg',
   'kg/kWh',
 ] as const;

@@ -12,6 +12,7 @@ import {
 } from '@/db/queries/projects';
 import { listLastRuns } from '@/db/queries/runs';
 import { findClimateId, findWeatherHeader } from '@/db/queries/weather-years';
+import { larkspurBills } from '@/data/demonstration/larkspur-bills';
 import { demonstration } from '@/data/demonstration/larkspur-house';
 import type { Answer, Conflict, Refusal } from '@/lib/schemas/answer';
 import type { DesignRecord } from '@/lib/schemas/design';
@@ -69,7 +70,16 @@ export function createProjectFromDemonstration(name?: string): Promise<Answer<{ 
     if (!input.ok) return input;
     const weatherYearId = (await findClimateId(database(), demonstration.climateId)) ?? null;
     const { house, prices, designs } = demonstration;
-    const project = { ownerId: account.id, name: input.data.name, house, prices, designs, weatherYearId };
+    const bills = larkspurBills();
+    const project = {
+      ownerId: account.id,
+      name: input.data.name,
+      house,
+      bills,
+      prices,
+      designs,
+      weatherYearId,
+    };
     const projectId = await database()
       .transaction()
       .execute((trx) => insertProject(trx, project));

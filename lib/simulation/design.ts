@@ -265,6 +265,8 @@ export interface House {
   floorAreaM2: number;
   volumeM3: number;
   shell: readonly ShellElement[];
+  /** loss by fuel bills / loss by shell and air change; absent = 1 */
+  calibration?: { factor: number };
   airChangePerH: number;
   windows: readonly WindowGain[];
   /** skyline of the site for array and windows alike; level where empty */

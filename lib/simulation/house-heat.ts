@@ -16,18 +16,19 @@ export interface HouseHeat {
 }
 
 /**
- * Heat loss of a house: H_T = Σ A U f, H_ve = 0.34 n V, Φ_HL = (H_T + H_ve)(θi − θe,d).
- * @param house shell [m², W/(m²K), -], air change [1/h], volume [m³], temperatures [°C]
+ * Heat loss of a house: H_T = c Σ A U f, H_ve = c 0.34 n V, Φ_HL = (H_T + H_ve)(θi − θe,d).
+ * @param house shell [m², W/(m²K), -], air change [1/h], volume [m³], temperatures [°C], c from fuel bills [-]
  * @returns coefficients [W/K] and design heat load [W]
  * @see EN 12831-1:2017, simplified form; ISO 13789 for the coefficients
  */
 export function houseHeat(
-  house: Pick<House, 'shell' | 'airChangePerH' | 'volumeM3' | 'roomSetC' | 'designOutdoorC'>,
+  house: Pick<House, 'shell' | 'calibration' | 'airChangePerH' | 'volumeM3' | 'roomSetC' | 'designOutdoorC'>,
 ): HouseHeat {
   const glazed = house.shell.filter(({ kind }) => kind === 'window' || kind === 'door');
-  const window = transmissionWPerK(glazed);
-  const opaque = transmissionWPerK(house.shell) - window;
-  const ventilation = ventilationWPerK(house.airChangePerH, house.volumeM3);
+  const factor = house.calibration?.factor ?? 1;
+  const window = factor * transmissionWPerK(glazed);
+  const opaque = factor * transmissionWPerK(house.shell) - window;
+  const ventilation = factor * ventilationWPerK(house.airChangePerH, house.volumeM3);
   const total = opaque + window + ventilation;
   return {
     opaqueWPerK: opaque,

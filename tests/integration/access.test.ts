@@ -1,8 +1,10 @@
 import { readdirSync } from 'node:fs';
 import path from 'node:path';
 import { afterAll, beforeAll, beforeEach, describe, expect, it, vi } from 'vitest';
+import { larkspurBills } from '@/data/demonstration/larkspur-bills';
 import { demonstration } from '@/data/demonstration/larkspur-house';
 import type { Refusal } from '@/lib/schemas/answer';
+import * as bills from '@/lib/server/bills';
 import * as designs from '@/lib/server/designs';
 import * as projects from '@/lib/server/projects';
 import * as runs from '@/lib/server/runs';
@@ -29,6 +31,11 @@ const OF_A_THING: Record<string, Call> = {
   renameProject: ({ projectId }) => projects.renameProject(projectId, 'Taken over'),
   saveHouse: ({ projectId }) => projects.saveHouse(projectId, demonstration.house, 1),
   savePrices: ({ projectId }) => projects.savePrices(projectId, demonstration.prices, 1),
+  readBills: ({ projectId }) => bills.readBills(projectId),
+  saveBills: ({ projectId }) => bills.saveBills(projectId, larkspurBills(), 1),
+  readModelHeat: ({ projectId }) => bills.readModelHeat(projectId),
+  takeLossFromBills: ({ projectId }) => bills.takeLossFromBills(projectId, 2),
+  releaseLoss: ({ projectId }) => bills.releaseLoss(projectId, 3),
   createDesign: ({ projectId }) => designs.createDesign(projectId, design),
   saveDesign: ({ designId }) => designs.saveDesign(designId, design, 1),
   readRun: ({ designId }) => runs.readRun(designId),
@@ -69,7 +76,7 @@ const INNER = [
   'sessions',
   'upload',
 ];
-const OUTER = { designs, projects, runs, 'weather-years': weatherYears };
+const OUTER = { bills, designs, projects, runs, 'weather-years': weatherYears };
 
 describe('the table of functions', () => {
   it('names every file of lib/server', () => {

@@ -29,7 +29,17 @@ describe.skipIf(!hasPostgres)('migrations', () => {
     const db = openDatabase(fresh.url);
     const tables = (await db.introspection.getTables()).map((table) => table.name);
     await db.destroy();
-    const needed = ['account', 'session', 'project', 'house', 'weather_year', 'collector', 'design', 'run'];
+    const needed = [
+      'account',
+      'session',
+      'project',
+      'house',
+      'bills',
+      'weather_year',
+      'collector',
+      'design',
+      'run',
+    ];
     expect(tables).toEqual(expect.arrayContaining(needed));
   });
 });
