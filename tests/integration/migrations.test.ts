@@ -21,7 +21,7 @@ describe.skipIf(!hasPostgres)('migrations', () => {
 
   it('go up from nothing once, although two begin at the same time', { timeout: 30_000 }, async () => {
     const said = await Promise.all([migrate(fresh.url), migrate(fresh.url)]);
-    expect(said.filter((words) => words.includes('2026-12-01-000-houses-and-runs'))).toHaveLength(1);
+    expect(said.filter((words) => words.startsWith('Database brought to'))).toHaveLength(1);
     expect(await migrate(fresh.url)).toBe('');
   });
 
