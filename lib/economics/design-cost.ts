@@ -30,6 +30,8 @@ export interface PricedDesign {
     replacements: readonly { label: string; pricePerM2: number; everyYears: number }[];
   };
   array: { areaM2: number; pipeLengthM: number };
+  /** a second field on the same store; its pipes are counted, pump and control are not bought twice */
+  second?: Pick<PricedDesign, 'collector' | 'array'> | null;
   store: { volumeL: number };
 }
 
@@ -72,28 +74,33 @@ export function designCost(
   result: Pick<YearResult, 'year'>,
 ): DesignCost {
   const { year } = result;
-  const { areaM2, pipeLengthM } = design.array;
-  const built = areaM2 > 0;
+  const fields = [design, ...(design.second ? [design.second] : [])].filter(({ array }) => array.areaM2 > 0);
+  const built = fields.length > 0;
+  const sum = (money: (field: (typeof fields)[number]) => number) =>
+    fields.reduce((total, field) => total + money(field), 0);
   const ownHoursAmount = built ? prices.ownHours * prices.hourlyRate : 0;
   const investment: MoneyLine[] = built
     ? [
-        { label: 'collectors', amount: design.collector.pricePerM2 * areaM2 },
+        { label: 'collectors', amount: sum(({ collector, array }) => collector.pricePerM2 * array.areaM2) },
         { label: 'store', amount: prices.storeFixed + prices.storePerL * design.store.volumeL },
         { label: 'pump and control', amount: prices.pumpAndControl },
-        { label: 'pipes', amount: prices.pipeFixed + prices.pipePerM * 2 * pipeLengthM },
+        {
+          label: 'pipes',
+          amount: prices.pipeFixed + prices.pipePerM * 2 * sum(({ array }) => array.pipeLengthM),
+        },
         { label: 'mixing and interface', amount: prices.interfaceFixed },
       ]
     : [];
   const toBuild = investment.reduce((sum, line) => sum + line.amount, 0);
   const priced: MoneyLine[] =
     ownHoursAmount > 0 ? [...investment, { label: 'own hours', amount: ownHoursAmount }] : investment;
-  const replacements: ReplacementLine[] = built
-    ? design.collector.replacements.map(({ label, pricePerM2, everyYears }) => ({
-        label,
-        amount: pricePerM2 * areaM2,
-        everyYears,
-      }))
-    : [];
+  const replacements: ReplacementLine[] = fields.flatMap(({ collector, array }) =>
+    collector.replacements.map(({ label, pricePerM2, everyYears }) => ({
+      label,
+      amount: pricePerM2 * array.areaM2,
+      everyYears,
+    })),
+  );
   const savedKwhPerYear = year.referenceBoughtKwh - year.boughtKwh;
   const pumpMoney = year.pumpKwh * prices.electricityPerKwh;
   const savedMoneyPerYear = savedKwhPerYear * prices.fuelPerKwh - pumpMoney;

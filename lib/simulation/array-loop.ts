@@ -52,6 +52,8 @@ export class ArrayLoop {
   a1 = 0.5;
   outdoorC = 0.5;
 
+  /** the array hangs outside in this hour */
+  mounted = false;
   full = false;
   /** water and plate while full, plate while empty [°C] */
   arrayC = 10.5;

@@ -1,15 +1,20 @@
-import { J_PER_KWH, SECONDS_PER_HOUR, WH_PER_KWH } from '@/lib/units/constants';
 import { markCarriers } from './carriers';
 import { judgeDryHours, type DryColumns } from './dry-hours';
 import { ENGINE_VERSION } from './engine-version';
 import { solarFractions } from './fractions';
 import { houseHeat } from './house-heat';
 import type { Plan } from './plan';
-import type { EnergyBalance, EnergyRow, YearResult } from './results';
+import type { EnergyBalance, EnergyRow, PartDryness, YearResult } from './results';
 import type { ReferenceNeed, SimulationInput } from './simulate';
 import { monthSum, type MonthField, type Tally } from './tally';
 import type { YearState } from './year';
-import { DAYS_IN_MONTH, HOURS_PER_DAY } from '@/lib/units/constants';
+import {
+  DAYS_IN_MONTH,
+  HOURS_PER_DAY,
+  HOURS_PER_YEAR,
+  J_PER_KWH,
+  SECONDS_PER_HOUR,
+} from '@/lib/units/constants';
 
 /** Turns the sums and columns of a run into the result that people read. */
 export function assembleResult(
@@ -18,19 +23,13 @@ export function assembleResult(
   state: YearState,
   tally: Tally,
   reference: ReferenceNeed,
-  dry: DryColumns,
+  dry: readonly DryColumns[],
 ): YearResult {
   const { columns } = tally;
   const heat = houseHeat(input.house);
   const carrierHours = markCarriers(columns, heat.designLoadW);
-  const { parts, overLimitHours } = judgeDryHours(
-    dry,
-    plan.columns.mounted,
-    plan.columns.planeWm2,
-    input.design.collector,
-    columns,
-  );
-  const months = Array.from({ length: 12 }, (_, month) => monthRow(tally, month, plan.pumpW));
+  const parts = judgeFields(input, plan, dry, columns);
+  const months = Array.from({ length: 12 }, (_, month) => monthRow(tally, month));
   const sum = yearRow(months);
   const backupKwh = sum.backupHeatingKwh + sum.backupTapKwh;
   const boughtKwh = tally.boughtJ / J_PER_KWH;
@@ -67,7 +66,7 @@ export function assembleResult(
       plateMaxC: tally.plateMaxC,
       coldestInletC: tally.coldestInletC,
       carrierHours,
-      overLimitHours,
+      overLimitHours: columns.overLimit.reduce((hours, mark) => (mark ? hours + 1 : hours), 0),
       designLoadW: heat.designLoadW,
     },
     balance: energyBalance(tally, plan),
@@ -75,7 +74,29 @@ export function assembleResult(
   };
 }
 
-function monthRow(tally: Tally, month: number, pumpW: number): EnergyRow {
+/** Judges the dry hours of each collector field; the columns of the result show the first. */
+function judgeFields(
+  input: SimulationInput,
+  plan: Plan,
+  dry: readonly DryColumns[],
+  columns: YearResult['columns'],
+): PartDryness[] {
+  const { collector, second } = input.design;
+  const first = judgeDryHours(dry[0]!, plan.columns.mounted, plan.columns.planeWm2, collector, columns);
+  if (!second || !plan.second) return first;
+  const unseen = () => new Float32Array(HOURS_PER_YEAR);
+  const aside = {
+    dryPlateC: unseen(),
+    dryCoverC: unseen(),
+    dryBackC: unseen(),
+    overLimit: columns.overLimit,
+  };
+  const { mounted, planeWm2 } = plan.second.columns;
+  const others = judgeDryHours(dry[1]!, mounted, planeWm2, second.collector, aside, first.length);
+  return [...first, ...others.map((part) => ({ ...part, name: `${part.name}, second field` }))];
+}
+
+function monthRow(tally: Tally, month: number): EnergyRow {
   const of = (field: MonthField) => monthSum(tally.monthJ, month, field);
   const kwh = (field: MonthField) => of(field) / J_PER_KWH;
   const pumpHours = of('pumpS') / SECONDS_PER_HOUR;
@@ -91,7 +112,7 @@ function monthRow(tally: Tally, month: number, pumpW: number): EnergyRow {
     planeKwh: kwh('plane'),
     storeLossKwh: kwh('storeLoss'),
     pipeLossKwh: kwh('pipeLoss'),
-    pumpKwh: (pumpW * pumpHours) / WH_PER_KWH,
+    pumpKwh: kwh('pump'),
     unusedKwh: kwh('unused'),
     starts: of('starts'),
     pumpHours,

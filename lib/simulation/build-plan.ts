@@ -30,7 +30,7 @@ import { acceptedSun } from './accepted-sun';
 import type { Collector, CollectorArray, Design, House, SkyModel } from './design';
 import { dryColumns, type DryColumns } from './dry-hours';
 import { emitterLoop, houseHeat } from './house-heat';
-import { EXCESS_STEP_K, EXCESS_STEPS, type Plan, type PlanColumns } from './plan';
+import { EXCESS_STEP_K, EXCESS_STEPS, type FieldPlan, type Plan, type PlanColumns } from './plan';
 import type { SimulationInput } from './simulate';
 import { SiteCache } from './site-cache';
 import { monthOf } from './tally';
@@ -55,6 +55,9 @@ const SLAB_UNLOCK_K = 0.5;
 const GREATEST_HANDOVER = 0.98;
 /** A small flow that stands for none where a flow divides. */
 const NO_FLOW = 1e-9;
+
+/** One collector field: collectors and how they hang. */
+type Field = Pick<Design, 'collector' | 'array'>;
 
 /** Keeps the newest few values by key. */
 class Memo<T> {
@@ -94,20 +97,24 @@ export class PlanBuilder {
   plan(input: SimulationInput): Plan {
     const { house, design, numerics } = input;
     const { site } = this.siteOf(input.weather);
-    const { collector, array } = design;
-    const plane = site.plane(array, numerics.skyModel, { horizon: house.horizon, rows: array });
-    const collectorColumns = this.collectorColumns(site, plane, collector, array);
-    const columns: PlanColumns = {
-      outdoorC: site.outdoorC,
-      planeWm2: plane.totalWm2,
-      mounted: mountedHours(array.mountedMonths),
-      ...collectorColumns,
-      ...this.houseColumns(input),
-    };
-    const hasArray = array.areaM2 > 0 && array.mountedMonths.some(Boolean);
-    const toSlab = design.loop.layout === 'straight to the slab';
     const housePlan = this.housePlan(house, design);
-    const pump = pumpDuty(design);
+    const field = ({ collector, array }: Field): FieldPlan => {
+      const plane = site.plane(array, numerics.skyModel, { horizon: house.horizon, rows: array });
+      const pump = pumpDuty({ array, loop: design.loop });
+      return {
+        array: arrayInput(design, { collector, array }, pump.flowKgPerS, housePlan),
+        columns: {
+          planeWm2: plane.totalWm2,
+          mounted: mountedHours(array.mountedMonths),
+          ...this.collectorColumns(site, plane, collector, array),
+        },
+        pumpW: pump.powerW,
+      };
+    };
+    const first = field(design);
+    const second = design.second && hangs(design.second.array) ? field(design.second) : null;
+    const columns: PlanColumns = { outdoorC: site.outdoorC, ...first.columns, ...this.houseColumns(input) };
+    const toSlab = design.loop.layout === 'straight to the slab';
     const storeKg = design.store.volumeL * WATER_KG_PER_L;
     const baseM2 = design.store.volumeL / L_PER_M3 / design.store.heightM;
     return {
@@ -116,12 +123,13 @@ export class PlanBuilder {
       theta: numerics.theta,
       stepsPerHour: STEPS_PER_HOUR,
       subStepCap: SUB_STEP_CAP,
-      hasArray,
-      array: arrayInput(design, pump.flowKgPerS, housePlan),
+      hasArray: hangs(design.array) || second !== null,
+      array: first.array,
+      second,
       toSlab,
       limitC: toSlab ? design.loop.slabRoomLimitC : design.controller.storeLimitC,
       unlockK: toSlab ? SLAB_UNLOCK_K : STORE_UNLOCK_K,
-      pumpW: pump.powerW,
+      pumpW: first.pumpW,
       layers: design.store.layers,
       storeKg,
       storeLossWPerK: layerLossesWPerK({
@@ -142,7 +150,8 @@ export class PlanBuilder {
   referencePlan(input: SimulationInput): Plan {
     const { design } = input;
     const store = { ...design.store, insideHouse: false };
-    return this.plan({ ...input, design: { ...design, store, array: { ...design.array, areaM2: 0 } } });
+    const array = { ...design.array, areaM2: 0 };
+    return this.plan({ ...input, design: { ...design, store, array, second: null } });
   }
 
   /** Key of all that the reference plan depends on. */
@@ -152,9 +161,8 @@ export class PlanBuilder {
   }
 
   /** Dry temperatures of every hour for the design's collector, orientation and wind. */
-  dry(input: SimulationInput): DryColumns {
+  dry(input: SimulationInput, { collector, array }: Field = input.design): DryColumns {
     const { site, id } = this.siteOf(input.weather);
-    const { collector, array } = input.design;
     const { tiltDeg, azimuthDeg, windFactor } = array;
     const { skyModel } = input.numerics;
     const { dry, curve, faceLayerM2KPerW } = collector;
@@ -290,6 +298,11 @@ export class PlanBuilder {
   }
 }
 
+/** Whether an array has area and months. */
+function hangs(array: CollectorArray): boolean {
+  return array.areaM2 > 0 && array.mountedMonths.some(Boolean);
+}
+
 function windowSun(site: SiteCache, house: House, model: SkyModel): Float64Array {
   const gain = new Float64Array(HOURS_PER_YEAR);
   for (const window of house.windows) {
@@ -367,10 +380,11 @@ function boreSectionM2(boreMm: number): number {
 
 function arrayInput(
   design: Design,
+  { collector, array }: Field,
   flowKgPerS: number,
   house: { floorKH: number; floorAreaM2: number; floorDownward: number },
 ): Plan['array'] {
-  const { array, collector, controller, loop, store } = design;
+  const { controller, loop, store } = design;
   const areaM2 = array.areaM2 * collector.widthFactor;
   const pipeWaterL = 2 * array.pipeLengthM * boreSectionM2(array.pipeBoreMm) * L_PER_M3;
   const ownVessel = loop.layout !== 'through the store';
@@ -412,8 +426,11 @@ function handover(
 }
 
 /** Flow and electric power of the running pump: the flow is given, or follows from its curve against lift and pipes. */
-export function pumpDuty(design: Design): { flowKgPerS: number; powerW: number; fillHeadM: number } {
-  const { array, loop } = design;
+export function pumpDuty({ array, loop }: Pick<Design, 'array' | 'loop'>): {
+  flowKgPerS: number;
+  powerW: number;
+  fillHeadM: number;
+} {
   const density = waterDensity(FRICTION_WATER_C);
   const viscosity = waterViscosity(FRICTION_WATER_C);
   const run = {

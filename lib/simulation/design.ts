@@ -171,6 +171,8 @@ export interface SupplyControl {
 export interface Design {
   collector: Collector;
   array: CollectorArray;
+  /** a second field of another kind on the same store, with the same layout and controller */
+  second: { collector: Collector; array: CollectorArray } | null;
   loop: Loop;
   controller: Controller;
   store: Store;

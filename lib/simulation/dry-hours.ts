@@ -97,8 +97,9 @@ export function dryColumns(
  * @param mounted 1 where the array hangs outside
  * @param planeWm2 irradiance on the plane [W/m²]
  * @param collector parts with their limits [°C]
- * @param columns columns of the result, filled
- * @returns dryness of each part, and the hours in which any part is above its short-term limit [h]
+ * @param columns columns of the result, filled; marks are added to `overLimit`
+ * @param firstBit bit of the first part in `overLimit` [-]; bits beyond the eighth share it
+ * @returns dryness of each part [°C], [h], [K h]
  * @see lib/physics/material-limits.ts
  */
 export function judgeDryHours(
@@ -107,21 +108,22 @@ export function judgeDryHours(
   planeWm2: Float64Array,
   collector: Collector,
   columns: Pick<HourColumns, 'dryPlateC' | 'dryCoverC' | 'dryBackC' | 'overLimit'>,
-): { parts: PartDryness[]; overLimitHours: number } {
+  firstBit = 0,
+): PartDryness[] {
   const { dryPlateC, dryCoverC, dryBackC, overLimit } = columns;
   for (let h = 0; h < HOURS_PER_YEAR; h++) {
     const counts = mounted[h] === 1 && planeWm2[h]! >= DRY_IRRADIANCE_WM2;
     dryPlateC[h] = counts ? dry.plateC[h]! : NaN;
     dryCoverC[h] = counts ? dry.coverC[h]! : NaN;
     dryBackC[h] = counts ? dry.backC[h]! : NaN;
-    overLimit[h] = 0;
   }
   const places = { absorber: dryPlateC, cover: dryCoverC, back: dryBackC };
-  const parts = collector.parts.map((part, index) => {
+  return collector.parts.map((part, index) => {
     const temperatures = places[part.place];
+    const bit = 1 << Math.min(7, firstBit + index);
     const hours = countLimitHours(temperatures, part.longTermLimitC, part.shortTermLimitC);
     for (let h = 0; h < HOURS_PER_YEAR; h++) {
-      if (temperatures[h]! > part.shortTermLimitC) overLimit[h]! |= 1 << index;
+      if (temperatures[h]! > part.shortTermLimitC) overLimit[h]! |= bit;
     }
     return {
       ...part,
@@ -133,7 +135,4 @@ export function judgeDryHours(
       monthHoursAboveShort: hours.monthHoursAboveShort,
     };
   });
-  let overLimitHours = 0;
-  for (let h = 0; h < HOURS_PER_YEAR; h++) if (overLimit[h] !== 0) overLimitHours++;
-  return { parts, overLimitHours };
 }

@@ -5,10 +5,8 @@
 import type { NetworkInput } from '@/lib/physics/house-network';
 import type { ArrayLoopInput } from './array-loop';
 
-/** Hourly columns of 8,760 values. */
-export interface PlanColumns {
-  /** outdoor air, mean of the hour [°C] */
-  outdoorC: Float64Array;
+/** Hourly columns of one collector field, 8,760 values each. */
+export interface FieldColumns {
   /** sun absorbed by the collector at its curve, all terms that do not depend on its temperature [W/m²] */
   absorbedWm2: Float64Array;
   /** linear loss with its wind term [W/(m²K)] */
@@ -17,6 +15,19 @@ export interface PlanColumns {
   planeWm2: Float64Array;
   /** 1 while the array hangs outside */
   mounted: Uint8Array;
+}
+
+/** One collector field on the store. */
+export interface FieldPlan {
+  array: ArrayLoopInput;
+  columns: FieldColumns;
+  pumpW: number;
+}
+
+/** Hourly columns of 8,760 values. */
+export interface PlanColumns extends FieldColumns {
+  /** outdoor air, mean of the hour [°C] */
+  outdoorC: Float64Array;
   /** sun through the windows [W] */
   windowSunW: Float64Array;
   /** set point of the room air [°C] */
@@ -35,6 +46,12 @@ export interface PlanColumns {
 export const EXCESS_STEP_K = 0.5;
 export const EXCESS_STEPS = 160;
 
+/** The collector fields of a plan, one or two. */
+export function fieldsOf(plan: Plan): FieldPlan[] {
+  const first = { array: plan.array, columns: plan.columns, pumpW: plan.pumpW };
+  return plan.second ? [first, plan.second] : [first];
+}
+
 export interface Plan {
   columns: PlanColumns;
   theta: number;
@@ -52,6 +69,8 @@ export interface Plan {
   limitC: number;
   unlockK: number;
   pumpW: number;
+  /** a second field of another kind on the same store */
+  second: FieldPlan | null;
 
   layers: number;
   storeKg: number;

@@ -3,6 +3,7 @@ import type { WeatherYear } from '@/lib/weather/weather-year';
 import type { Design, House, Numerics } from './design';
 import { assembleResult } from './assemble-result';
 import { PlanBuilder } from './build-plan';
+import type { DryColumns } from './dry-hours';
 import type { Plan } from './plan';
 import type { YearResult } from './results';
 import { createColumns, Tally } from './tally';
@@ -79,7 +80,7 @@ export function createSimulator(): Simulator {
       tally.columns = createColumns(plan.layers);
       const { status, state } = runPlan(plan, tally);
       if (status !== 'done') return failure(status);
-      return { ok: true, result: assembleResult(input, plan, state, tally, need, builder.dry(input)) };
+      return { ok: true, result: assembleResult(input, plan, state, tally, need, dryFields(builder, input)) };
     },
   };
 }
@@ -94,6 +95,11 @@ function shellRefusal({ network }: Plan): YearOutcome | undefined {
     code: 'shell and floor disagree',
     message: `Walls, roof and ground lose ${figures}, more than the inner surfaces of ${network.floorAreaM2} m² of floor can give (${hMs.toFixed(0)} W/K). Check areas and U of the shell against the heated floor area.`,
   };
+}
+
+function dryFields(builder: PlanBuilder, input: SimulationInput): DryColumns[] {
+  const { second } = input.design;
+  return second ? [builder.dry(input), builder.dry(input, second)] : [builder.dry(input)];
 }
 
 function failure(status: YearStatus): YearOutcome {

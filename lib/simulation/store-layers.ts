@@ -11,14 +11,19 @@
 
 import { WATER_SPECIFIC_HEAT_J_PER_KG_K as CP } from '@/lib/physics/water';
 
-/** What flows through the store during one sub-step; set by the loops, read by `advance`. */
-export class StoreFlows {
-  /** charging flow [kg/s], enters at `chargeLevel` with `chargeC`, leaves from the bottom */
-  chargeKgPerS = 0.0;
-  chargeC = 0.5;
+/** Where a collector field charges the store: its water enters at `level` and leaves from the bottom. */
+export class ChargePort {
+  kgPerS = 0.0;
+  waterC = 0.5;
   /** the same in the first stage, before the inlet of the array was known */
-  firstChargeC = 0.5;
-  chargeLevel = 0;
+  firstC = 0.5;
+  level = 0;
+}
+
+/** What flows through the store during one sub-step; set by the loops, read by `predict` and `correct`. */
+export class StoreFlows {
+  /** one port for each collector field */
+  readonly charges: ChargePort[];
   /** heating draw from the top [kg/s], comes back with `returnC` into `returnLevel` */
   heatingKgPerS = 0.0;
   returnC = 0.5;
@@ -30,6 +35,10 @@ export class StoreFlows {
   /** tap water through a coil from the bottom to the top [kg/s]; `coilKept` of its lag stays after one layer [-] */
   coilKgPerS = 0.0;
   coilKept = 0.5;
+
+  constructor(fields: number) {
+    this.charges = Array.from({ length: fields }, () => new ChargePort());
+  }
 }
 
 export class StoreLayers {
@@ -39,6 +48,8 @@ export class StoreLayers {
   private readonly predicted: Float64Array;
   private readonly rate: Float64Array;
   private readonly rate2: Float64Array;
+  /** of all fields together [kg/s] */
+  private chargeKgPerS = 0.5;
   /** net flow from layer i to layer i + 1 [kg/s] */
   private readonly down: Float64Array;
   /** loss of each layer [W/K] */
@@ -53,7 +64,7 @@ export class StoreLayers {
   bottomKg: number;
   private readonly conductionKgPerS: number;
   roomC: number;
-  readonly flows = new StoreFlows();
+  readonly flows: StoreFlows;
   /** length of the sub-step [s] */
   dtS = 0.5;
 
@@ -73,6 +84,7 @@ export class StoreLayers {
    * @param lossWPerK loss of each layer [W/K]
    * @param conductionWPerK vertical conduction between neighbouring layers [W/K]
    * @param roomC room of the store [°C]
+   * @param fields collector fields that charge the store [-] 1 or 2
    */
   constructor(
     count: number,
@@ -80,8 +92,10 @@ export class StoreLayers {
     lossWPerK: Float64Array,
     conductionWPerK: number,
     roomC: number,
+    fields = 1,
   ) {
     this.count = count;
+    this.flows = new StoreFlows(fields);
     this.t = new Float64Array(count);
     this.predicted = new Float64Array(count);
     this.rate = new Float64Array(count);
@@ -122,7 +136,9 @@ export class StoreLayers {
   stepLimitS(theta: number): number {
     const f = this.flows;
     const drawn = f.heatingKgPerS + f.tapKgPerS;
-    const largest = Math.max(f.chargeKgPerS, drawn);
+    let charge = 0;
+    for (let k = 0; k < f.charges.length; k++) charge += f.charges[k]!.kgPerS;
+    const largest = Math.max(charge, drawn);
     let limit = largest > 0 ? (theta * this.layerKg) / largest : Infinity;
     if (f.heatingKgPerS > 0 && this.count > 1) {
       const top = this.t[0]!;
@@ -136,14 +152,18 @@ export class StoreLayers {
 
   /** Net flows at the interfaces, fixed for both stages of a sub-step. */
   private settleFlows(): void {
-    const { chargeKgPerS, chargeLevel, heatingKgPerS, returnLevel, tapKgPerS } = this.flows;
+    const { charges, heatingKgPerS, returnLevel, tapKgPerS } = this.flows;
     const down = this.down;
-    for (let i = 0; i < this.count - 1; i++) {
-      let flow = -tapKgPerS;
-      if (chargeLevel <= i) flow += chargeKgPerS;
-      if (returnLevel > i) flow -= heatingKgPerS;
-      down[i] = flow;
+    const last = this.count - 1;
+    for (let i = 0; i < last; i++) down[i] = returnLevel > i ? -tapKgPerS - heatingKgPerS : -tapKgPerS;
+    let charge = 0;
+    for (let k = 0; k < charges.length; k++) {
+      const { kgPerS, level } = charges[k]!;
+      if (kgPerS === 0) continue;
+      charge += kgPerS;
+      for (let i = level; i < last; i++) down[i]! += kgPerS;
     }
+    this.chargeKgPerS = charge;
   }
 
   /** Rates of change [K/s] of all layers at temperatures `t` into `out`. */
@@ -151,7 +171,7 @@ export class StoreLayers {
     const f = this.flows;
     const down = this.down;
     const last = this.count - 1;
-    const charge = f.chargeKgPerS;
+    const charge = this.chargeKgPerS;
     const conduction = this.conductionKgPerS;
     const lossPerS = this.lossPerS;
     const room = this.roomC;
@@ -171,8 +191,12 @@ export class StoreLayers {
     const perBottom = 1 / this.bottomKg;
     const net = above - charge * here + f.tapKgPerS * tapReturn;
     out[last] = net * perBottom - lossPerS[last]! * this.layerKg * perBottom * (here - room);
-    if (charge > 0)
-      out[f.chargeLevel]! += charge * f.chargeC * (f.chargeLevel === last ? perBottom : perLayer);
+    if (charge > 0) {
+      for (let k = 0; k < f.charges.length; k++) {
+        const { kgPerS, waterC, level } = f.charges[k]!;
+        out[level]! += kgPerS * waterC * (level === last ? perBottom : perLayer);
+      }
+    }
     this.stageTap = f.tapKgPerS * (top - tapReturn);
     if (f.coilKgPerS > 0) this.coil(t, out);
     if (f.heatingKgPerS > 0) {
@@ -218,17 +242,19 @@ export class StoreLayers {
   }
 
   /**
-   * Second stage. The charging water of the first stage came with `flows.firstChargeC`; both stages are booked with
-   * the final `flows.chargeC`, so that the heat given is that of the array.
+   * Second stage. The charging water of the first stage came with `firstC`; both stages are booked with
+   * the final `waterC`, so that the heat given is that of the array.
    */
   correct(): void {
     const { flows: f, dtS } = this;
     const last = this.count - 1;
     this.rates(this.predicted, this.rate2);
     this.tapW = 0.5 * CP * (this.firstTap + this.stageTap);
-    const shift = f.chargeKgPerS * (f.chargeC - f.firstChargeC);
-    if (shift !== 0) {
-      this.rate[f.chargeLevel]! += shift / (f.chargeLevel === last ? this.bottomKg : this.layerKg);
+    if (this.chargeKgPerS > 0) {
+      for (let k = 0; k < f.charges.length; k++) {
+        const { kgPerS, waterC, firstC, level } = f.charges[k]!;
+        this.rate[level]! += (kgPerS * (waterC - firstC)) / (level === last ? this.bottomKg : this.layerKg);
+      }
     }
     const half = 0.5 * dtS;
     const room = this.roomC;

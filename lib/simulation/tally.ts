@@ -18,6 +18,7 @@ export const MONTH_FIELDS = [
   'storeLoss',
   'pipeLoss',
   'unused',
+  'pump',
   'pumpS',
   'starts',
   'outdoorCS',
@@ -102,13 +103,15 @@ export class Tally {
   readonly changeJ = new Float64Array(4);
 
   starts = 0;
+  /** time in this hour in which a pump ran [s] */
+  pumpS = 0;
   coldestInletC = Infinity;
   plateMaxC = -Infinity;
 
   private hourStarts = 0;
   private givenJ = 0;
   private hourPipeJ = 0;
-  private pumpS = 0;
+  private pumpJ = 0;
   private unusedJ = 0;
   /** mean powers [W] and loop temperatures [°C] of the hour that is being worked, by `HOUR` */
   readonly hour = new Float64Array(13);
@@ -148,33 +151,30 @@ export class Tally {
   }
 
   private noteStored(state: YearState, into: Float64Array): void {
-    const pipes = state.loop.input.pipeCapacityJPerK * state.loop.pipeC;
-    into[0] = state.loop.heatJ() - pipes;
-    into[1] = pipes;
+    into.fill(0);
+    for (const loop of state.loops) {
+      const pipes = loop.input.pipeCapacityJPerK * loop.pipeC;
+      into[0]! += loop.heatJ() - pipes;
+      into[1]! += pipes;
+    }
     into[2] = state.store.heatJ();
     into[3] = state.network.heatJ();
   }
 
-  /** Books a sub-step of the array. */
-  book(loop: ArrayLoop, sunJ: number, runningS: number): void {
+  /** Books a sub-step of a collector field. */
+  book(loop: ArrayLoop, sunJ: number, pumpJ: number): void {
     this.arraySunJ += sunJ;
     this.arrayLossJ += loop.arrayLossJ;
     this.hourPipeJ += loop.pipeLossJ;
     this.givenJ += loop.givenJ;
-    this.pumpS += runningS;
+    this.pumpJ += pumpJ;
   }
 
-  /** Books what the array could have given at the bottom temperature while the store was locked. */
-  bookUnused(
-    areaM2: number,
-    absorbedWm2: number,
-    a1: number,
-    a2: number,
-    excessK: number,
-    dtS: number,
-  ): void {
-    const power = absorbedWm2 - a1 * excessK - a2 * excessK * Math.abs(excessK);
-    if (power > 0) this.unusedJ += areaM2 * power * dtS;
+  /** Books what a field could have given at the sink's temperature in its sub-step while the sink was locked. */
+  bookUnused(loop: ArrayLoop, excessK: number): void {
+    const { areaM2, a2 } = loop.input;
+    const power = loop.absorbedWm2 - loop.a1 * excessK - a2 * excessK * Math.abs(excessK);
+    if (power > 0) this.unusedJ += areaM2 * power * loop.dtS;
   }
 
   /** Writes the columns of the hour whose mean powers stand in `hour`, and adds its sums to month and year. */
@@ -191,7 +191,8 @@ export class Tally {
     c.planeWm2[h] = planeWm2;
     c.arrayW[h] = this.givenJ / SECONDS_PER_HOUR;
     c.pumpShare[h] = this.pumpS / SECONDS_PER_HOUR;
-    c.arrayC[h] = state.mounted ? state.loop.arrayC : outdoorC;
+    const first = state.loops[0]!;
+    c.arrayC[h] = first.mounted ? first.arrayC : outdoorC;
     c.solarHeatingW[h] = solarHeatingW;
     c.solarTapW[h] = solarTapW;
     c.backupHeatingW[h] = backupHeatingW;
@@ -216,13 +217,18 @@ export class Tally {
     m[row + 5]! += backupTapW * SECONDS_PER_HOUR;
     m[row + 6]! += unmetW * SECONDS_PER_HOUR;
     m[row + 7]! += this.givenJ;
-    m[row + 8]! += state.mounted ? planeWm2 * plan.array.areaM2 * SECONDS_PER_HOUR : 0;
+    for (let k = 0; k < state.loops.length; k++) {
+      const { mounted, input } = state.loops[k]!;
+      const plane = k === 0 ? planeWm2 : plan.second!.columns.planeWm2[h]!;
+      if (mounted) m[row + 8]! += plane * input.areaM2 * SECONDS_PER_HOUR;
+    }
     m[row + 9]! += hour[HOUR.STORE_LOSS]! * SECONDS_PER_HOUR;
     m[row + 10]! += this.hourPipeJ;
     m[row + 11]! += this.unusedJ;
-    m[row + 12]! += this.pumpS;
-    m[row + 13]! += this.starts - this.hourStarts;
-    m[row + 14]! += outdoorC * SECONDS_PER_HOUR;
+    m[row + 12]! += this.pumpJ;
+    m[row + 13]! += this.pumpS;
+    m[row + 14]! += this.starts - this.hourStarts;
+    m[row + 15]! += outdoorC * SECONDS_PER_HOUR;
 
     this.boughtJ +=
       (backupHeatingW / plan.columns.heatingEfficiency[h]! + backupTapW / plan.columns.tapEfficiency[h]!) *
@@ -238,7 +244,7 @@ export class Tally {
     this.windowSunJ += plan.columns.windowSunW[h]! * SECONDS_PER_HOUR;
     this.internalJ += plan.internalW * SECONDS_PER_HOUR;
     this.hourStarts = this.starts;
-    this.givenJ = this.hourPipeJ = this.pumpS = this.unusedJ = 0;
+    this.givenJ = this.hourPipeJ = this.pumpS = this.pumpJ = this.unusedJ = 0;
   }
 }
 

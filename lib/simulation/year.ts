@@ -8,7 +8,7 @@ import { floorSurfaceCoefficient } from '@/lib/physics/floor';
 import { WATER_SPECIFIC_HEAT_J_PER_KG_K as CP } from '@/lib/physics/water';
 import { HOURS_PER_YEAR, SECONDS_PER_HOUR } from '@/lib/units/constants';
 import { ArrayLoop } from './array-loop';
-import { EXCESS_STEP_K, EXCESS_STEPS, type Plan } from './plan';
+import { EXCESS_STEP_K, EXCESS_STEPS, fieldsOf, type Plan } from './plan';
 import { StoreLayers } from './store-layers';
 import { HOUR, type Tally } from './tally';
 
@@ -48,9 +48,9 @@ export type YearStatus = 'done' | 'too stiff' | 'not finite';
 export class YearState {
   readonly network: HouseNetwork;
   readonly store: StoreLayers;
-  readonly loop: ArrayLoop;
+  /** one for each collector field */
+  readonly loops: ArrayLoop[];
   locked = false;
-  mounted = false;
   windowsOpen = false;
   subSteps = 0;
 
@@ -63,13 +63,16 @@ export class YearState {
       plan.storeLossWPerK,
       plan.conductionWPerK,
       plan.storeRoomC,
+      fieldsOf(plan).length,
     );
     this.store.t.fill(plan.roomSetC);
-    if (!plan.array.ownVessel) this.store.takeFromBottom(-plan.array.waterKg);
-    this.loop = new ArrayLoop(plan.array);
-    this.loop.arrayC = plan.columns.outdoorC[0]!;
-    this.loop.pipeC = plan.columns.outdoorC[0]!;
-    this.loop.vesselC = plan.array.vesselRoomC;
+    this.loops = fieldsOf(plan).map(({ array }) => {
+      if (!array.ownVessel) this.store.takeFromBottom(-array.waterKg);
+      const loop = new ArrayLoop(array);
+      loop.arrayC = loop.pipeC = plan.columns.outdoorC[0]!;
+      loop.vesselC = array.vesselRoomC;
+      return loop;
+    });
   }
 }
 
@@ -82,8 +85,10 @@ export class YearState {
  * @returns 'done', or why the run was given up
  */
 export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus {
-  const { network, store, loop } = state;
+  const { network, store, loops } = state;
+  const fields = fieldsOf(plan);
   const flows = store.flows;
+  const charges = flows.charges;
   const stepsPerHour = plan.stepsPerHour;
   const stepS = SECONDS_PER_HOUR / stepsPerHour;
   const columns = plan.columns;
@@ -92,8 +97,6 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
   const floorShareUp = 1 - plan.floorDownward;
   const loopWPerK = loopKgPerS * CP;
   const hasFloor = floorWPerK > 0;
-  const flowKgPerS = plan.array.flowKgPerS;
-  const areaM2 = plan.array.areaM2;
   const storeInside = plan.storeInside;
   tally.begin(state);
   let subSteps = 0;
@@ -107,16 +110,18 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
     const roomSetC = columns.roomSetC[h]!;
     const windowSunW = columns.windowSunW[h]!;
     const internalW = plan.internalW;
-    const absorbedWm2 = columns.absorbedWm2[h]!;
-    loop.outdoorC = outdoorC;
-    loop.absorbedWm2 = absorbedWm2;
-    loop.a1 = columns.a1[h]!;
-
-    const mounted = hasArray && columns.mounted[h] === 1;
-    if (mounted !== state.mounted) {
-      if (loop.full) loop.drain(store);
-      tally.dismountedJ += loop.relax();
-      state.mounted = mounted;
+    for (let k = 0; k < loops.length; k++) {
+      const loop = loops[k]!;
+      const field = fields[k]!.columns;
+      loop.outdoorC = outdoorC;
+      loop.absorbedWm2 = field.absorbedWm2[h]!;
+      loop.a1 = field.a1[h]!;
+      const mounted = hasArray && field.mounted[h] === 1 && loop.input.areaM2 > 0;
+      if (mounted !== loop.mounted) {
+        if (loop.full) loop.drain(store);
+        tally.dismountedJ += loop.relax();
+        loop.mounted = mounted;
+      }
     }
 
     if (plan.windowOpening) state.windowsOpen = network.airC > OPENING_C && outdoorC < network.airC;
@@ -208,19 +213,21 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
       while (rest > TIME_TOLERANCE_S) {
         const topC = toSlab ? network.airC : store.topC;
         const sinkC = toSlab ? network.slabC : store.bottomC;
-        loop.sinkC = sinkC;
         const held = switches >= SWITCH_CAP;
-        if (loop.full) {
-          const overLimit = topC > limitC;
-          if (!held && (overLimit || loop.wantsStop())) {
+        const overLimit = topC > limitC;
+        if (overLimit) state.locked = true;
+        else if (state.locked && topC < limitC - unlockK) state.locked = false;
+        let switched = false;
+        for (let k = 0; k < loops.length; k++) {
+          const loop = loops[k]!;
+          loop.sinkC = sinkC;
+          if (loop.full && !held && (overLimit || loop.wantsStop())) {
             loop.drain(store);
-            if (overLimit) state.locked = true;
             switches++;
-            continue;
+            switched = true;
           }
-        } else if (state.locked) {
-          if (topC < limitC - unlockK) state.locked = false;
-        } else if (topC > limitC) state.locked = true;
+        }
+        if (switched) continue;
 
         let heatingKgPerS = 0;
         if (drawsStore && demandW > 0 && !plan.ideal) {
@@ -242,67 +249,77 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
         flows.heatingKgPerS = heatingKgPerS;
         flows.tapKgPerS = preheatKgPerS;
         flows.coilKgPerS = coilKgPerS;
-        flows.chargeKgPerS = loop.full && !toSlab ? flowKgPerS : 0;
         flows.returnC = returnC;
+        let running = 0;
+        for (let k = 0; k < loops.length; k++) {
+          const { full, input } = loops[k]!;
+          charges[k]!.kgPerS = full && !toSlab ? input.flowKgPerS : 0;
+          if (full) running++;
+        }
         let dt = Math.min(rest, store.stepLimitS(theta));
 
-        if (loop.full) {
-          loop.prepareRunning();
-          if (!held) {
+        for (let k = 0; k < loops.length && !switched; k++) {
+          const loop = loops[k]!;
+          if (loop.full) {
+            loop.prepareRunning();
+            if (held) continue;
             loop.findStop();
             dt = Math.min(dt, loop.switchS);
-          }
-        } else if (mounted) {
-          loop.prepareEmpty();
-          if (!state.locked && !held) {
+          } else if (loop.mounted) {
+            loop.prepareEmpty();
+            if (state.locked || held) continue;
             loop.findStart();
-            if (loop.switchS <= TIME_TOLERANCE_S) {
+            if (loop.switchS > TIME_TOLERANCE_S) dt = Math.min(dt, loop.switchS);
+            else {
               loop.fill(store);
               tally.starts++;
               switches++;
-              continue;
+              switched = true;
             }
-            dt = Math.min(dt, loop.switchS);
           }
         }
+        if (switched) continue;
         if (dt < TIME_TOLERANCE_S) dt = Math.min(rest, 1e-3);
 
         store.dtS = dt;
-        loop.dtS = dt;
         flows.returnLevel = heatingKgPerS > 0 ? store.levelFor(returnC) : 0;
-        if (toSlab) {
-          store.lossJ = 0;
-          if (loop.full) {
+        for (let k = 0; k < loops.length; k++) {
+          const loop = loops[k]!;
+          loop.dtS = dt;
+          if (!loop.full) continue;
+          loop.findCharge();
+          const port = charges[k]!;
+          port.waterC = port.firstC = loop.chargeC;
+          port.level = store.levelFor(loop.chargeC);
+        }
+        if (toSlab) store.lossJ = 0;
+        else if (running > 0 || heatingKgPerS + preheatKgPerS + coilKgPerS > 0) {
+          store.predict();
+          for (let k = 0; k < loops.length; k++) {
+            const loop = loops[k]!;
+            if (!loop.full) continue;
+            loop.shiftSink(store.bottomMeanC);
             loop.findCharge();
-            loop.advanceRunning();
-            slabHeatJ += loop.givenJ;
-            tally.book(loop, areaM2 * absorbedWm2 * dt, dt);
-            if (sinkC < tally.coldestInletC) tally.coldestInletC = sinkC;
+            charges[k]!.waterC = loop.chargeC;
           }
-        } else if (loop.full) {
-          loop.findCharge();
-          flows.chargeC = flows.firstChargeC = loop.chargeC;
-          flows.chargeLevel = store.levelFor(loop.chargeC);
-          store.predict();
-          loop.shiftSink(store.bottomMeanC);
-          loop.findCharge();
-          flows.chargeC = loop.chargeC;
-          store.correct();
-          loop.advanceRunning();
-          tally.book(loop, areaM2 * absorbedWm2 * dt, dt);
-          if (sinkC < tally.coldestInletC) tally.coldestInletC = sinkC;
-        } else if (heatingKgPerS + preheatKgPerS + coilKgPerS > 0) {
-          flows.chargeLevel = 0;
-          store.predict();
           store.correct();
         } else store.rest();
-        if (mounted && !loop.full) {
-          loop.advanceEmpty();
-          tally.book(loop, areaM2 * absorbedWm2 * dt, 0);
-          if (loop.arrayC > tally.plateMaxC) tally.plateMaxC = loop.arrayC;
-          if (state.locked) {
-            tally.bookUnused(areaM2, absorbedWm2, loop.a1, plan.array.a2, sinkC - outdoorC, dt);
+        for (let k = 0; k < loops.length; k++) {
+          const loop = loops[k]!;
+          if (loop.full) {
+            loop.advanceRunning();
+            if (toSlab) slabHeatJ += loop.givenJ;
+            tally.book(loop, loop.input.areaM2 * loop.absorbedWm2 * dt, fields[k]!.pumpW * dt);
+          } else if (loop.mounted) {
+            loop.advanceEmpty();
+            tally.book(loop, loop.input.areaM2 * loop.absorbedWm2 * dt, 0);
+            if (loop.arrayC > tally.plateMaxC) tally.plateMaxC = loop.arrayC;
+            if (state.locked) tally.bookUnused(loop, sinkC - outdoorC);
           }
+        }
+        if (running > 0) {
+          tally.pumpS += dt;
+          if (sinkC < tally.coldestInletC) tally.coldestInletC = sinkC;
         }
         if (heatingKgPerS > 0) storeHeatJ += heatingKgPerS * CP * (store.topMeanC - returnC) * dt;
         if (preheatKgPerS + coilKgPerS > 0) tapHeatJ += store.tapW * dt;

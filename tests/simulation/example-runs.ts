@@ -14,6 +14,7 @@ export const [upland, lowland] = climates.map((climate) => climate.weatherYear()
 export interface Change {
   cover?: Collector['cover'];
   array?: Partial<Design['array']>;
+  second?: Design['second'];
   loop?: Partial<Design['loop']>;
   controller?: Partial<Design['controller']>;
   store?: Partial<Design['store']>;
@@ -40,6 +41,7 @@ export function example(change: Change = {}): SimulationInput {
     design: {
       collector: change.cover ? collectorByCover[change.cover] : design.collector,
       array: { ...design.array, mountedMonths: Array<boolean>(12).fill(true), ...change.array },
+      second: change.second ?? null,
       loop: { ...design.loop, ...change.loop },
       controller: { ...design.controller, ...change.controller },
       store: { ...design.store, ...change.store },

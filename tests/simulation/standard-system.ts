@@ -76,6 +76,7 @@ export function runStandardSystem(system: StandardSystem): { loadJ: number; sola
 /** One hour in sub-steps as in the year loop; returns the heat that the load took from the store [J]. */
 function runHour(loop: ArrayLoop, store: StoreLayers, loadW: number, exchangerWPerK: number): number {
   const { flows } = store;
+  const charge = flows.charges[0]!;
   let given = 0;
   let rest = SECONDS_PER_HOUR;
   while (rest > NOTHING_LEFT_S) {
@@ -96,7 +97,7 @@ function runHour(loop: ArrayLoop, store: StoreLayers, loadW: number, exchangerWP
     const excessK = store.topC - ROOM_C;
     const wantedW = Math.min(loadW, exchangerWPerK * excessK);
     flows.heatingKgPerS = wantedW > 0 ? wantedW / (CP * excessK) : 0;
-    flows.chargeKgPerS = loop.full ? loop.input.flowKgPerS : 0;
+    charge.kgPerS = loop.full ? loop.input.flowKgPerS : 0;
     const untilSwitch = hot && !loop.full ? Infinity : Math.max(loop.switchS, SHORTEST_S);
     const dt = Math.min(rest, untilSwitch, store.stepLimitS(THETA));
     loop.dtS = store.dtS = dt;
@@ -108,14 +109,14 @@ function runHour(loop: ArrayLoop, store: StoreLayers, loadW: number, exchangerWP
 }
 
 function advance(loop: ArrayLoop, store: StoreLayers): void {
-  const { flows } = store;
+  const charge = store.flows.charges[0]!;
   if (loop.full) {
     loop.findCharge();
-    flows.chargeC = flows.firstChargeC = loop.chargeC;
+    charge.waterC = charge.firstC = loop.chargeC;
     store.predict();
     loop.shiftSink(store.bottomMeanC);
     loop.findCharge();
-    flows.chargeC = loop.chargeC;
+    charge.waterC = loop.chargeC;
     store.correct();
     loop.advanceRunning();
   } else {
