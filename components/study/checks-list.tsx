@@ -1,25 +1,32 @@
 import { memo } from 'react';
 import type { Finding } from '@/lib/checks/findings';
+import type { StudyAnswer } from '@/lib/study/study-question';
+import { explainFinding } from './explain-finding';
+import { HowComputed } from './how-computed-button';
 
 const WORDS: Record<Finding['severity'], string> = { stop: 'Stop.', caution: 'Caution.', note: 'Note.' };
 
 /** What the engineering checks found, the gravest first: a mark, the word, the sentence. */
-export const ChecksList = memo(function ChecksList({
-  findings,
-}: {
-  findings: readonly Finding[] | undefined;
-}) {
+export const ChecksList = memo(function ChecksList({ answer }: { answer: StudyAnswer | undefined }) {
+  const findings = answer?.findings;
   return (
     <section aria-labelledby="checks-heading" className="pt-1 rule-ink">
       <h2 id="checks-heading" className="sr-only">
         Checks
       </h2>
       <ul>
-        {(findings ?? []).map((finding) => (
+        {answer?.findings.map((finding) => (
           <li key={`${finding.id} ${finding.text}`} className="flex gap-3 py-1.5 rule-hair">
             <CheckMark severity={finding.severity} />
             <p title={`Source: ${finding.source}`}>
-              <strong>{WORDS[finding.severity]}</strong> {finding.text}
+              <strong>{WORDS[finding.severity]}</strong> {finding.text}{' '}
+              <HowComputed
+                className="word text-note"
+                label={`How check ${finding.id} was judged`}
+                explain={() => explainFinding(finding, answer)}
+              >
+                How?
+              </HowComputed>
             </p>
           </li>
         ))}

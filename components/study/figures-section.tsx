@@ -1,7 +1,11 @@
 import type { ReactNode } from 'react';
+import { Scientific } from '@/components/method/scientific';
 import type { Prices } from '@/lib/schemas/prices';
 import type { StudyAnswer } from '@/lib/study/study-question';
 import { currencySign, formatFixed, formatShare, formatSignificant, withUnit } from '@/lib/units/display';
+import { explainBalance, explainCost, explainFraction } from './explain-figures';
+import type { BalanceName, CostName, FractionName } from './explain-figures';
+import { HowComputed } from './how-computed-button';
 
 const CENTS = 100;
 const kwh = (value: number) => withUnit(formatSignificant(value, 3), 'kWh');
@@ -11,6 +15,15 @@ export function BalanceSection({ answer }: { answer: StudyAnswer }) {
   const { balance, year } = answer.result;
   const sum = (parts: Record<string, number>) =>
     Object.values(parts).reduce((total, part) => total + part, 0);
+  const line = (text: string, name: BalanceName, value: number) => {
+    const words = kwh(value);
+    return [
+      text,
+      <HowComputed key={name} explain={() => explainBalance(name, answer, words)}>
+        {words}
+      </HowComputed>,
+    ] as const;
+  };
   return (
     <section aria-labelledby="balance-heading">
       <h2 id="balance-heading">Where the heat goes</h2>
@@ -19,18 +32,23 @@ export function BalanceSection({ answer }: { answer: StudyAnswer }) {
       </p>
       <Rows
         rows={[
-          ['sun on the array', kwh(balance.inKwh.arraySun)],
-          ['lost at the array', kwh(balance.outKwh.arrayLoss)],
-          ['lost in pipes', kwh(balance.outKwh.pipeLoss)],
-          ['lost from the store', kwh(balance.outKwh.storeLoss)],
-          ['given to heating and hot water', kwh(year.solarHeatingKwh + year.solarTapKwh)],
-          ['left over because the store was full', kwh(year.unusedKwh)],
-          ['pump, electricity', kwh(year.pumpKwh)],
+          line('sun on the array', 'arraySun', balance.inKwh.arraySun),
+          line('lost at the array', 'arrayLoss', balance.outKwh.arrayLoss),
+          line('lost in pipes', 'pipeLoss', balance.outKwh.pipeLoss),
+          line('lost from the store', 'storeLoss', balance.outKwh.storeLoss),
+          line('given to heating and hot water', 'given', year.solarHeatingKwh + year.solarTapKwh),
+          line('left over because the store was full', 'unused', year.unusedKwh),
+          line('pump, electricity', 'pump', year.pumpKwh),
         ]}
       />
       <p className="mt-2 text-note text-muted">
-        Residual of the energy balance: <Scientific value={balance.residualShare} /> of all heat that went in.
-        Stored at the end against the start: {kwh(sum(balance.storedKwh))}.
+        Residual of the energy balance:{' '}
+        <HowComputed
+          explain={() => explainBalance('residual', answer, balance.residualShare.toExponential(1))}
+        >
+          <Scientific value={balance.residualShare} />
+        </HowComputed>{' '}
+        of all heat that went in. Stored at the end against the start: {kwh(sum(balance.storedKwh))}.
       </p>
     </section>
   );
@@ -38,6 +56,9 @@ export function BalanceSection({ answer }: { answer: StudyAnswer }) {
 
 export function FractionsSection({ answer }: { answer: StudyAnswer }) {
   const { fractions } = answer.result.year;
+  const share = (name: FractionName) => (
+    <HowComputed explain={() => explainFraction(name, answer)}>{formatShare(fractions[name])}</HowComputed>
+  );
   return (
     <section aria-labelledby="fractions-heading">
       <h2 id="fractions-heading">Three solar fractions</h2>
@@ -46,7 +67,7 @@ export function FractionsSection({ answer }: { answer: StudyAnswer }) {
         rows={[
           [
             <Definition key="solar" term="solar fraction" text="solar heat over solar and backup heat" />,
-            formatShare(fractions.solar),
+            share('solar'),
           ],
           [
             <Definition
@@ -54,7 +75,7 @@ export function FractionsSection({ answer }: { answer: StudyAnswer }) {
               term="thermal savings"
               text="bought energy saved against the same house without sun and store"
             />,
-            formatShare(fractions.savedThermal),
+            share('savedThermal'),
           ],
           [
             <Definition
@@ -62,7 +83,7 @@ export function FractionsSection({ answer }: { answer: StudyAnswer }) {
               term="extended savings"
               text="the same, less the pump’s power at 0.4"
             />,
-            formatShare(fractions.savedExtended),
+            share('savedExtended'),
           ],
         ]}
       />
@@ -73,6 +94,9 @@ export function FractionsSection({ answer }: { answer: StudyAnswer }) {
 export function ReceiptSection({ answer, prices }: { answer: StudyAnswer; prices: Prices }) {
   const { heat, toBuild, backupHeatPerKwh, ownHours, ownHoursAmount } = answer.cost;
   const money = (amount: number) => withUnit(formatSignificant(amount, 3), currencySign(prices.currency));
+  const open = (name: CostName, text: string) => (
+    <HowComputed explain={() => explainCost(name, answer, prices)}>{text}</HowComputed>
+  );
   if (!Number.isFinite(heat.perKwh)) {
     return (
       <section aria-labelledby="receipt-heading">
@@ -85,8 +109,8 @@ export function ReceiptSection({ answer, prices }: { answer: StudyAnswer; prices
     <section aria-labelledby="receipt-heading">
       <h2 id="receipt-heading">What a kilowatt-hour costs</h2>
       <p className="mb-2 font-display text-h3">
-        {money(toBuild)} to build; heat from the backup costs {formatFixed(backupHeatPerKwh * CENTS, 1)}{' '}
-        cents.
+        {open('toBuild', money(toBuild))} to build; heat from the backup costs{' '}
+        {open('backupHeat', formatFixed(backupHeatPerKwh * CENTS, 1))} cents.
       </p>
       <dl className="pt-1 rule-ink">
         {heat.receipt
@@ -101,12 +125,13 @@ export function ReceiptSection({ answer, prices }: { answer: StudyAnswer; prices
           ))}
         <div className="mt-1 flex justify-between border-t-3 border-double border-ink pt-1 font-strong">
           <dt>cents per kWh</dt>
-          <dd className="tabular-nums">{formatFixed(heat.perKwh * CENTS, 2)}</dd>
+          <dd className="tabular-nums">{open('perKwh', formatFixed(heat.perKwh * CENTS, 2))}</dd>
         </div>
       </dl>
       <p className="mt-2 text-note text-muted">
         {withUnit(String(prices.realRate), '%')} real over {prices.years} years, prices of {prices.priceYear}.
-        Each saved bought kilowatt-hour costs {formatFixed(heat.perSavedKwh * CENTS, 1)} cents.
+        Each saved bought kilowatt-hour costs {open('perSavedKwh', formatFixed(heat.perSavedKwh * CENTS, 1))}{' '}
+        cents.
         {ownHoursAmount === 0 &&
           ownHours > 0 &&
           ` ${formatFixed(ownHours)} hours of your own are not priced.`}
@@ -123,7 +148,7 @@ function Definition({ term, text }: { term: string; text: string }) {
   );
 }
 
-function Rows({ rows }: { rows: readonly (readonly [ReactNode, string])[] }) {
+function Rows({ rows }: { rows: readonly (readonly [ReactNode, ReactNode])[] }) {
   return (
     <dl className="rule-ink">
       {rows.map(([name, value], place) => (
@@ -133,15 +158,5 @@ function Rows({ rows }: { rows: readonly (readonly [ReactNode, string])[] }) {
         </div>
       ))}
     </dl>
-  );
-}
-
-function Scientific({ value }: { value: number }) {
-  if (value === 0) return <>0</>;
-  const exponent = Math.floor(Math.log10(Math.abs(value)));
-  return (
-    <span className="whitespace-nowrap">
-      {formatFixed(value / 10 ** exponent, 1)} × 10<sup>{formatFixed(exponent)}</sup>
-    </span>
   );
 }

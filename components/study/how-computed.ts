@@ -1,18 +1,25 @@
 import type { HouseRecord } from '@/lib/schemas/house';
-import type { Prices } from '@/lib/schemas/prices';
 import type { StudyAnswer } from '@/lib/study/study-question';
-import { formatFixed, formatShare, formatSignificant, formatTyped, withUnit } from '@/lib/units/display';
+import { formatShare, formatSignificant, formatTyped, withUnit } from '@/lib/units/display';
+import { backupSchema } from '@/lib/schemas/house';
+import { pricesSchema } from '@/lib/schemas/prices';
+import type { Prices } from '@/lib/schemas/prices';
+import { collectorSchema } from '@/lib/schemas/collector';
+import { arraySchema } from '@/lib/schemas/design';
+import {
+  CHOICES_LINK,
+  COLLECTOR_CURVE,
+  COST_OF_HEAT,
+  FRACTIONS,
+  REPLACEMENTS,
+  YEAR_LOOP,
+  designInputs,
+  enteredInput,
+  equationLink,
+} from './explanation';
+import type { Explanation } from './explanation';
 import { fuelAmount, pricePerKwh } from './verdict-words';
 import type { VerdictNumber } from './verdict-words';
-
-/** How a number of the verdict was made. */
-export interface Explanation {
-  title: string;
-  value: string;
-  equation: string;
-  inputs: { name: string; value: string }[];
-  source: string;
-}
 
 const kwh = (value: number) => withUnit(formatSignificant(value, 3), 'kWh');
 
@@ -37,11 +44,8 @@ export function explain(
           name: 'heat for each kilowatt-hour drawn, over the year',
           value: formatSignificant(backupKwh / year.boughtKwh, 2),
         }
-      : {
-          name: 'seasonal efficiency of the backup',
-          value: formatTyped(house.backup.seasonalEfficiency),
-        };
-  const perKg = { name: 'energy in the fuel', value: withUnit(formatTyped(prices.fuelKwhPerKg), 'kWh/kg') };
+      : enteredInput(backupSchema.shape.seasonalEfficiency, house.backup.seasonalEfficiency);
+  const perKg = enteredInput(pricesSchema.shape.fuelKwhPerKg, prices.fuelKwhPerKg);
   switch (number) {
     case 'area':
       return {
@@ -49,11 +53,13 @@ export function explain(
         value: withUnit(formatTyped(design.array.areaM2), 'm²'),
         equation: 'An input: the lever below sets it.',
         inputs: [
+          enteredInput(arraySchema.shape.areaM2, design.array.areaM2),
           { name: 'area basis of the curve', value: design.collector.curve.areaBasis },
-          { name: 'filled width of the absorber', value: formatTyped(design.collector.widthFactor) },
+          enteredInput(collectorSchema.shape.widthFactor, design.collector.widthFactor),
           { name: 'collected per square metre', value: kwh(year.collectedKwh / design.array.areaM2) },
         ],
         source: 'Area basis as in ISO 9806.',
+        method: [COLLECTOR_CURVE, equationLink('Another area basis', 'collector', 'toAreaBasis')],
       };
     case 'share':
       return {
@@ -66,7 +72,9 @@ export function explain(
           { name: 'backup to the heating', value: kwh(year.backupHeatingKwh) },
           { name: 'backup to hot water', value: kwh(year.backupTapKwh) },
         ],
+        entered: designInputs(design),
         source: 'Solar fraction of ISO 9488; sums over the hours of this run.',
+        method: [FRACTIONS, YEAR_LOOP, COLLECTOR_CURVE, CHOICES_LINK],
       };
     case 'price':
       return {
@@ -80,10 +88,10 @@ export function explain(
             value: pricePerKwh(line.perKwh, prices.currency),
           })),
           { name: 'solar heat a year', value: kwh(solarKwh) },
-          { name: 'real interest', value: withUnit(formatTyped(prices.realRate), '%') },
-          { name: 'years counted', value: formatFixed(prices.years) },
         ],
+        entered: priceInputs(prices),
         source: 'Form of IEA SHC Task 54; house emitters and boiler are not counted.',
+        method: [COST_OF_HEAT, REPLACEMENTS],
       };
     case 'fuel':
       return {
@@ -97,7 +105,9 @@ export function explain(
           { name: 'bought energy', value: kwh(year.boughtKwh) },
           perKg,
         ],
+        entered: designInputs(design),
         source: 'Sums over the hours of this run.',
+        method: [YEAR_LOOP, CHOICES_LINK],
       };
     case 'reference':
       return {
@@ -107,6 +117,20 @@ export function explain(
           'need of the same house in the same year without array and store, divided by the efficiency of the backup',
         inputs: [{ name: 'need without the sun', value: kwh(year.referenceNeedKwh) }, efficiency, perKg],
         source: 'A run of its own with the same house and weather.',
+        method: [YEAR_LOOP, equationLink('Heat loss of the house', 'house', 'houseHeat'), CHOICES_LINK],
       };
   }
+}
+
+/** The entered prices behind a cost of heat. */
+export function priceInputs(prices: Prices) {
+  const { realRate, years, upkeepPerYear, storeFixed, storePerL, electricityPerKwh } = pricesSchema.shape;
+  return [
+    enteredInput(realRate, prices.realRate),
+    enteredInput(years, prices.years),
+    enteredInput(storeFixed, prices.storeFixed, prices.currency),
+    enteredInput(storePerL, prices.storePerL, prices.currency),
+    enteredInput(upkeepPerYear, prices.upkeepPerYear, prices.currency),
+    enteredInput(electricityPerKwh, prices.electricityPerKwh, prices.currency),
+  ];
 }

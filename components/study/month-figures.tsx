@@ -1,7 +1,9 @@
 import { MONTHS, MONTH_FIRST_DAY, monthOrder } from '@/components/mosaic/calendar';
 import { DAYS_SHOWN, columnOfDay } from '@/components/mosaic/stones';
-import type { EnergyRow, YearResult } from '@/lib/simulation/results';
+import type { YearResult } from '@/lib/simulation/results';
 import { formatFixed, formatSignificant } from '@/lib/units/display';
+import { explainMonth } from './explain-month';
+import { HowComputed } from './how-computed-button';
 
 const figure = (kwh: number) => (kwh < 100 ? formatFixed(kwh) : formatSignificant(kwh, 3));
 
@@ -18,7 +20,7 @@ export function MonthFigures({ result, firstDay }: { result: YearResult | undefi
             style={{ left: `${(columnOfDay(MONTH_FIRST_DAY[month]!, firstDay) / DAYS_SHOWN) * 100}%` }}
           >
             <span className="sr-only">{MONTHS[month]}: </span>
-            {result && <MonthFigure month={result.months[month]!} />}
+            {result && <MonthFigure month={month} result={result} />}
           </li>
         ))}
       </ol>
@@ -26,12 +28,19 @@ export function MonthFigures({ result, firstDay }: { result: YearResult | undefi
   );
 }
 
-function MonthFigure({ month }: { month: EnergyRow }) {
-  const sun = month.solarHeatingKwh + month.solarTapKwh;
-  const need = sun + month.backupHeatingKwh + month.backupTapKwh + month.unmetKwh;
+function MonthFigure({ month, result }: { month: number; result: YearResult }) {
+  const row = result.months[month]!;
+  const sun = row.solarHeatingKwh + row.solarTapKwh;
+  const need = sun + row.backupHeatingKwh + row.backupTapKwh + row.unmetKwh;
   return (
     <>
-      <strong className="block text-sun-text">{figure(sun)}</strong>
+      <HowComputed
+        className="block min-h-6 font-strong text-sun-text"
+        label={`${figure(sun)} kWh in ${MONTHS[month]}: how it was computed`}
+        explain={() => explainMonth(month, result)}
+      >
+        {figure(sun)}
+      </HowComputed>
       <span className="whitespace-nowrap text-muted">of {figure(need)}</span>
     </>
   );

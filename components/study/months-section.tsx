@@ -6,6 +6,8 @@ import { MONTHS, monthOrder } from '@/components/mosaic/calendar';
 import { StoneSwatch } from '@/components/mosaic/stone-swatch';
 import type { YearResult } from '@/lib/simulation/results';
 import { formatSignificant, withUnit } from '@/lib/units/display';
+import { explainMonth } from './explain-month';
+import { HowComputed } from './how-computed-button';
 
 /** The twelve months: a chart that opens with what to see, and the same as a table. */
 export function MonthsSection({ result, firstDay }: { result: YearResult; firstDay: number }) {
@@ -86,7 +88,14 @@ function MonthsTable({ result, firstDay }: { result: YearResult; firstDay: numbe
                 </th>
                 <td data-number>{cell(month.heatingKwh)}</td>
                 <td data-number>{cell(month.tapKwh)}</td>
-                <td data-number>{cell(month.solarHeatingKwh + month.solarTapKwh)}</td>
+                <td data-number>
+                  <HowComputed
+                    label={`${MONTHS[index]}, from the sun: how it was computed`}
+                    explain={() => explainMonth(index, result)}
+                  >
+                    {cell(month.solarHeatingKwh + month.solarTapKwh)}
+                  </HowComputed>
+                </td>
                 <td data-number>{cell(month.backupHeatingKwh + month.backupTapKwh)}</td>
                 <td data-number>{cell(month.collectedKwh)}</td>
               </tr>

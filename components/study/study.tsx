@@ -103,7 +103,7 @@ export function Study(props: StudyProps) {
             >
               {actions(design, changed, setDesign)}
             </LeversPanel>
-            <ChecksList findings={answer?.findings} />
+            <ChecksList answer={answer} />
           </>
         }
       />

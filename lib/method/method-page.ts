@@ -45,9 +45,10 @@ function checksByCall(): Map<string, CheckedRow[]> {
   return found;
 }
 
-/** Equations and helpers with words of their own; a method without a docstring says nothing. */
-function isShown(entry: MethodEntry): boolean {
-  return entry.purpose !== '' && (entry.numeric || entry.sources.length > 0 || entry.name.includes('.'));
+/** Quantities, and the steps of the loop over the year; a method without a docstring says nothing. */
+function isShown({ purpose, numeric, sources, name, file }: MethodEntry): boolean {
+  const isStep = name.includes('.') || file.startsWith('lib/simulation/');
+  return purpose !== '' && (numeric || sources.length > 0 || isStep);
 }
 
 /**

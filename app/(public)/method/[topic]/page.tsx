@@ -102,7 +102,7 @@ function FileSection({ file }: { file: MethodPage['files'][number] }) {
           {file.constants.map(({ name, value, meaning }) => (
             <div key={name} className="flex flex-wrap justify-between gap-x-4 py-1 rule-hair">
               <dt>
-                <Prose text={meaning} /> <i className="text-note break-all text-muted">{name}</i>
+                <Prose text={meaning} /> <i className="text-note break-words text-muted">{name}</i>
               </dt>
               <dd className="tabular-nums">{value}</dd>
             </div>
