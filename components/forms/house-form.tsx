@@ -2,6 +2,7 @@
 
 import type { ReactNode } from 'react';
 import { houseSchema, type HouseRecord } from '@/lib/schemas/house';
+import { CalibrationLine } from './calibration-line';
 import { Caution } from './caution';
 import type { ContentsEntry } from './contents';
 import { Field } from './field';
@@ -27,7 +28,7 @@ const CONTENTS: readonly ContentsEntry[] = [
     ],
   },
   { id: 'air', title: 'Air change', fields: ['airChangePerH', 'windowOpening'] },
-  { id: 'shell', title: 'The shell', fields: ['shell'] },
+  { id: 'shell', title: 'The shell', fields: ['shell', 'calibration'] },
   { id: 'windows', title: 'Windows and gains', fields: ['windows'] },
   { id: 'horizon', title: 'Horizon', fields: ['horizon'] },
   { id: 'emitters', title: 'Emitters', fields: ['emitters'] },
@@ -91,7 +92,9 @@ export function HouseForm({ projectId, stored, currency, save, frieze }: HouseFo
           <Field path="windowOpening" />
         </FieldRow>
       </FormSection>
-      <ShellSection />
+      <ShellSection>
+        <CalibrationLine billsHref={`/projects/${projectId}/bills`} />
+      </ShellSection>
       <FormSection id="windows" title="Windows toward the sun">
         <RowTable
           path="windows"
@@ -125,6 +128,8 @@ export function HouseForm({ projectId, stored, currency, save, frieze }: HouseFo
           <Field path="emitters.floor.downwardLoss" />
           <Field path="emitters.radiators.ratedW" />
           <Field path="emitters.radiators.exponent" />
+          <Field path="emitters.zones.share" />
+          <Field path="emitters.zones.floorShare" />
         </FieldRow>
       </FormSection>
       <FormSection id="hot-water" title="Hot water">

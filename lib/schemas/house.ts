@@ -509,6 +509,25 @@ export const houseSchema = z.object({
     }),
     floor: floorSchema,
     radiators: radiatorsSchema,
+    zones: z
+      .object({
+        share: z.enum(['by output', 'by zone']).default('by output').meta({
+          label: 'Flow shared',
+          help: 'Between floor and radiators: by what each gives at the design supply, or by the load of the zone that each heats.',
+        }),
+        floorShare: quantity({
+          label: 'Load in the floor’s zone',
+          unit: '',
+          min: 0.02,
+          max: 0.98,
+          step: 0.01,
+          default: 0.7,
+          origin: 'typed',
+          source: 'room by room loads of EN 12831-1',
+          help: 'Share of the design load in the rooms with floor heating; only by zone.',
+        }),
+      })
+      .prefault({}),
   }),
   hotWater: hotWaterSchema,
   backup: backupSchema,

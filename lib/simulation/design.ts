@@ -223,6 +223,12 @@ export interface Emitters {
   kind: 'water' | 'ideal';
   floor: Floor;
   radiators: Radiators;
+  /** how the loop's flow is shared between floor and radiators */
+  zones: {
+    share: 'by output' | 'by zone';
+    /** share of the design load in the zone of the floor [-]; only by zone */
+    floorShare: number;
+  };
 }
 
 export interface HotWater {

@@ -55,7 +55,7 @@ export interface EmitterLoop {
 
 /**
  * Sizes the loop for the design load at the design spread and shares its flow by what floor and radiators give
- * at the mean temperature of the design day.
+ * at the mean temperature of the design day, or by the load of the zones that they heat.
  * @param house emitters and room set point
  * @param heat design heat load [W]
  * @param supply design supply [°C] and spread [K]
@@ -63,7 +63,7 @@ export interface EmitterLoop {
  * @see EN 1264-3 (flow from load and spread); EN 442-2; the share by output is common practice, no source
  */
 export function emitterLoop(house: House, heat: HouseHeat, supply: SupplyControl): EmitterLoop {
-  const { floor, radiators } = house.emitters;
+  const { floor, radiators, zones } = house.emitters;
   const meanExcessK = Math.max(1, supply.designSupplyC - 0.5 * supply.designSpreadK - house.roomSetC);
   const floorKH =
     floor.areaM2 > 0
@@ -74,7 +74,9 @@ export function emitterLoop(house: House, heat: HouseHeat, supply: SupplyControl
   const sum = floorDesignW + radiatorDesignW;
   const loopKgPerS =
     Math.max(heat.designLoadW, 500) / (WATER_SPECIFIC_HEAT_J_PER_KG_K * supply.designSpreadK);
-  const floorShare = sum > 0 ? floorDesignW / sum : 0;
+  const byOutput = sum > 0 ? floorDesignW / sum : 0;
+  const both = floorDesignW > 0 && radiatorDesignW > 0;
+  const floorShare = both && zones.share === 'by zone' ? zones.floorShare : byOutput;
   return {
     floorKH,
     loopKgPerS,

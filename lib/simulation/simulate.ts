@@ -1,4 +1,5 @@
 import { HouseNetwork } from '@/lib/physics/house-network';
+import { HOURS_PER_DAY } from '@/lib/units/constants';
 import type { WeatherYear } from '@/lib/weather/weather-year';
 import type { Design, House, Numerics } from './design';
 import { assembleResult } from './assemble-result';
@@ -55,14 +56,14 @@ export function createSimulator(): Simulator {
   const builder = new PlanBuilder();
   const references = new Map<string, ReferenceNeed>();
 
-  function reference(input: SimulationInput): ReferenceNeed | YearStatus {
+  function reference(input: SimulationInput): ReferenceNeed | YearOutcome {
     const key = builder.referenceKey(input);
     const kept = references.get(key);
     if (kept) return kept;
     const plan = builder.referencePlan(input);
     const tally = new Tally(plan.layers);
-    const { status } = runPlan(plan, tally);
-    if (status !== 'done') return status;
+    const { status, state } = runPlan(plan, tally);
+    if (status !== 'done') return failure(status, state);
     const need = tally.need();
     if (references.size > 20) references.clear();
     references.set(key, need);
@@ -75,11 +76,11 @@ export function createSimulator(): Simulator {
       const refused = shellRefusal(plan) ?? layoutRefusal(plan);
       if (refused) return refused;
       const need = reference(input);
-      if (typeof need === 'string') return failure(need);
+      if ('ok' in need) return need;
       const tally = new Tally(plan.layers);
       tally.columns = createColumns(plan.layers);
       const { status, state } = runPlan(plan, tally);
-      if (status !== 'done') return failure(status);
+      if (status !== 'done') return failure(status, state);
       return { ok: true, result: assembleResult(input, plan, state, tally, need, dryFields(builder, input)) };
     },
   };
@@ -102,9 +103,11 @@ function dryFields(builder: PlanBuilder, input: SimulationInput): DryColumns[] {
   return second ? [builder.dry(input), builder.dry(input, second)] : [builder.dry(input)];
 }
 
-function failure(status: YearStatus): YearOutcome {
-  const code = status === 'done' ? 'not finite' : status;
-  return { ok: false, code, message: MESSAGES[code] };
+function failure(code: Exclude<YearStatus, 'done'>, { network, store, lastHour }: YearState): YearOutcome {
+  const day = Math.floor(lastHour / HOURS_PER_DAY) + 1;
+  const figure = (value: number) => (Number.isFinite(value) ? value.toFixed(1) : 'no number');
+  const where = `It stopped on day ${day} at ${lastHour % HOURS_PER_DAY}:00 with ${figure(network.airC)} °C in the rooms and ${figure(store.topC)} to ${figure(store.bottomC)} °C in the store.`;
+  return { ok: false, code, message: `${MESSAGES[code]} ${where}` };
 }
 
 function layoutRefusal(plan: Plan): YearOutcome | undefined {

@@ -42,6 +42,10 @@ const {
   RETURN,
 } = HOUR;
 
+/** Temperatures beyond these are the sign of a state that ran away [°C]. */
+const LEAST_SOUND_C = -200;
+const GREATEST_SOUND_C = 1000;
+
 export type YearStatus = 'done' | 'too stiff' | 'not finite';
 
 /** The bodies that carry heat from one hour to the next. */
@@ -53,6 +57,8 @@ export class YearState {
   locked = false;
   windowsOpen = false;
   subSteps = 0;
+  /** hour in which a run was given up [h] */
+  lastHour = 0;
 
   constructor(plan: Plan) {
     this.network = new HouseNetwork(plan.network);
@@ -381,12 +387,19 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
     hour[SUPPLY] = dutySum > 0 ? supplySum / dutySum : NaN;
     hour[RETURN] = dutySum > 0 ? returnSum / dutySum : NaN;
     tally.closeHour(h, state, plan);
-    if (subSteps > plan.subStepCap) return 'too stiff';
-    if (!(network.airC > -200 && store.topC > -200 && store.topC < 1000)) return 'not finite';
+    if (subSteps > plan.subStepCap || !sound(network.airC) || !sound(store.topC) || !sound(store.bottomC)) {
+      state.lastHour = h;
+      return subSteps > plan.subStepCap ? 'too stiff' : 'not finite';
+    }
   }
   state.subSteps = subSteps;
   tally.end(state);
   return 'done';
+}
+
+/** Whether a temperature is a number that a house can have [°C]. */
+function sound(temperatureC: number): boolean {
+  return temperatureC > LEAST_SOUND_C && temperatureC < GREATEST_SOUND_C;
 }
 
 /** Reads the table of radiators [W/K] at an excess of the supply over the room [K]. */

@@ -51,13 +51,19 @@ export function example(change: Change = {}): SimulationInput {
   };
 }
 
-const { floor, radiators } = demonstration.house.emitters;
+const { floor, radiators, zones } = demonstration.house.emitters;
 
-export const onlyFloor: House['emitters'] = { kind: 'water', floor, radiators: { ...radiators, ratedW: 0 } };
+export const onlyFloor: House['emitters'] = {
+  kind: 'water',
+  floor,
+  radiators: { ...radiators, ratedW: 0 },
+  zones,
+};
 export const onlyRadiators: House['emitters'] = {
   kind: 'water',
   floor: { ...floor, areaM2: 0 },
   radiators: { ...radiators, ratedW: 18_000 },
+  zones,
 };
 export const idealHeat: House['emitters'] = { ...demonstration.house.emitters, kind: 'ideal' };
 /** Radiators fed with 55 °C on the coldest day. */
