@@ -6,6 +6,7 @@ import { shortestNoonShadow } from '@/lib/sun/row-shading';
 import { formatFixed, formatShare, formatSignificant, withUnit } from '@/lib/units/display';
 import { DAYS_IN_MONTH, HOURS_PER_DAY, SECONDS_PER_HOUR } from '@/lib/units/constants';
 import type { CheckSubject } from './findings';
+import { EQUATION_RANGES } from './ranges';
 
 export type Severity = 'stop' | 'caution' | 'note';
 export type Where = 'collector' | 'array' | 'store' | 'supply' | 'hot water' | 'house' | 'prices' | 'weather';
@@ -355,6 +356,33 @@ export const RULES: readonly Rule[] = [
       when(
         design.array.areaM2 > 0,
         () => 'Wind and snow loads, roof and ballast: local code and a licensed engineer decide.',
+      ),
+  },
+  {
+    id: 'R1',
+    severity: 'note',
+    where: 'house',
+    source: 'validity ranges of the equations, method pages',
+    judge: (subject) =>
+      EQUATION_RANGES.flatMap(({ name, unit, low, high, equation, value }) => {
+        const figure = value(subject);
+        return figure !== undefined && (figure < low || figure > high)
+          ? [
+              `${name}: ${withUnit(formatSignificant(figure), unit)} lies outside ${low} to ${withUnit(String(high), unit)}, the range of ${equation}. The figures that rest on it are less certain.`,
+            ]
+          : [];
+      }),
+  },
+  {
+    id: 'T0',
+    severity: 'note',
+    where: 'collector',
+    source: 'ISO 9806: curves are tested with water warmer than air',
+    judge: ({ result }) =>
+      when(
+        result.year.colderThanAirHours > 0.05 * result.year.pumpHours && result.year.colderThanAirHours >= 10,
+        () =>
+          `In ${hoursText(result.year.colderThanAirHours)} the array ran with water colder than the air: its curve is extrapolated there.`,
       ),
   },
   {

@@ -64,6 +64,7 @@ export function assembleResult(
       latitudeDeg: input.weather.latitudeDeg,
       storeMaxC: largest(columns.storeTopC),
       plateMaxC: tally.plateMaxC,
+      colderThanAirHours: colderThanAir(columns),
       coldestInletC: tally.coldestInletC,
       carrierHours,
       overLimitHours: columns.overLimit.reduce((hours, mark) => (mark ? hours + 1 : hours), 0),
@@ -164,6 +165,13 @@ function largest(values: Float32Array): number {
   let most = -Infinity;
   for (const value of values) if (value > most) most = value;
   return most;
+}
+
+/** Hours in which most of the time a pump ran with the first field colder than the air. */
+function colderThanAir({ pumpShare, arrayC, outdoorC }: YearResult['columns']): number {
+  let hours = 0;
+  for (let h = 0; h < pumpShare.length; h++) if (pumpShare[h]! > 0.5 && arrayC[h]! < outdoorC[h]!) hours++;
+  return hours;
 }
 
 /** Largest value in hours in which the other column has one. */

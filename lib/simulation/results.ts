@@ -133,6 +133,8 @@ export interface YearTotals extends EnergyRow {
   storeMaxC: number;
   /** highest plate temperature that the run itself reached (not the dry temperature) */
   plateMaxC: number;
+  /** hours with the pump on and the full array colder than outdoor air: the curve is extrapolated [h] */
+  colderThanAirHours: number;
   /** coldest water that left the store for the array [°C]; Infinity if none did */
   coldestInletC: number;
   carrierHours: number[];

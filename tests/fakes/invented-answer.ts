@@ -56,6 +56,7 @@ export function inventedAnswer(design: DesignRecord, figures: InventedFigures): 
     coldestInletC: 15,
     storeMaxC: 60,
     plateMaxC: 80,
+    colderThanAirHours: 0,
     carrierHours: Array<number>(CARRIERS.length).fill(0),
     overLimitHours: 0,
     designLoadW: 5700,
