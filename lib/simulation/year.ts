@@ -169,6 +169,8 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
         const inside = storeInside ? storeLossW : 0;
         network.drive(outdoorC, outdoorC, gainToAir + inside, gainToSurface, gainToMass, slabSunW);
       }
+      // the radiators see the air of the step before: the free response would be the room without their own heat
+      const roomC = network.airC;
       network.solve();
 
       // thermostat: duty of the emitters at full flow and set supply, solved for the air of this step
@@ -183,7 +185,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
           demandW = Math.min(ratedW, Math.max(0, (roomSetC - network.airC) / network.airRise(1, 0, 0)));
         } else {
           floorW = hasFloor ? Math.max(0, floorWPerK * (setC - network.slabC)) : 0;
-          radiatorW = Math.max(0, radiatorWPerK * (setC - network.airC));
+          radiatorW = Math.max(0, radiatorWPerK * (setC - roomC));
           const rise = network.airRise(
             RADIATOR_TO_AIR * radiatorW,
             (1 - RADIATOR_TO_AIR) * radiatorW,
@@ -197,7 +199,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
             // the backup cannot lift the whole loop to its set supply: the supply stays where its power ends
             supplyC = store.topC + lift;
             floorW = hasFloor ? Math.max(0, floorWPerK * (supplyC - network.slabC)) : 0;
-            radiatorW = Math.max(0, radiatorWPerK * (supplyC - network.airC));
+            radiatorW = Math.max(0, radiatorWPerK * (supplyC - roomC));
             network.airRise(RADIATOR_TO_AIR * radiatorW, (1 - RADIATOR_TO_AIR) * radiatorW, floorW);
             fullW = floorW / floorShareUp + radiatorW;
             returnC = supplyC - fullW / loopWPerK;
@@ -242,7 +244,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
         }
         let preheatKgPerS = 0;
         let coilKgPerS = 0;
-        if (drawsStore && tapKgPerS > 0 && topC > mainsC) {
+        if (drawsStore && tapLoadW > 0 && topC > mainsC) {
           if (coilWPerK > 0) {
             coilKgPerS = coilFlow(store, tapKgPerS, mainsC, plan.tapSetC, coilWPerK);
             flows.coilKept = Math.exp(-coilWPerK / (store.count * coilKgPerS * CP));
