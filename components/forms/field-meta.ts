@@ -20,6 +20,12 @@ export function metaOf(schema: z.ZodType): FieldMeta {
   return meta;
 }
 
+/** Whether a field holds a calendar day. */
+export function isDay(schema: z.ZodType): boolean {
+  const meta = z.globalRegistry.get(schema) as { kind?: unknown } | undefined;
+  return meta?.kind === 'day';
+}
+
 /** The words that a choice offers; undefined for a field that is no choice. */
 export function choicesOf(schema: z.ZodType): readonly string[] | undefined {
   const here = bare(schema);

@@ -3,7 +3,8 @@
 import { quantityMeta } from '@/lib/schemas/quantity';
 import { bare, schemaAt } from './typed-values';
 import { ChoiceField } from './choice-field';
-import { choicesOf } from './field-meta';
+import { DayField } from './day-field';
+import { choicesOf, isDay } from './field-meta';
 import { useFormKnowledge } from './form-context';
 import { QuantityField } from './quantity-field';
 import { TextField } from './text-field';
@@ -24,6 +25,7 @@ export function Field(props: FieldProps) {
   const here = schemaAt(schema, props.path);
   const meta = quantityMeta(here);
   if (meta) return <QuantityField {...props} meta={meta} />;
+  if (isDay(here)) return <DayField {...props} schema={here} />;
   const choices = choicesOf(here);
   if (choices) return <ChoiceField {...props} schema={here} choices={choices} />;
   return bare(here).type === 'boolean' ? (

@@ -6,6 +6,7 @@ import { CalibrationLine } from './calibration-line';
 import { Caution } from './caution';
 import type { ContentsEntry } from './contents';
 import { Field } from './field';
+import { FieldsWhen } from './fields-when';
 import { FieldRow, FormSection } from './form-section';
 import { RowTable } from './row-table';
 import { SchemaForm } from './schema-form';
@@ -50,6 +51,18 @@ const HORIZON_COLUMNS = [
   { field: 'altitudeDeg', track: '6rem' },
 ];
 
+const EMITTERS = [
+  'floor.areaM2',
+  'floor.spacingMm',
+  'floor.screedMm',
+  'floor.screedConductivity',
+  'floor.coveringM2KPerW',
+  'floor.downwardLoss',
+  'radiators.ratedW',
+  'radiators.exponent',
+  'zones.share',
+].map((field) => `emitters.${field}`);
+
 interface HouseFormProps {
   projectId: string;
   stored: Stored<HouseRecord>;
@@ -78,12 +91,14 @@ export function HouseForm({ projectId, stored, currency, save, frieze }: HouseFo
           <Field path="volumeM3" />
           <Field path="capacityClass" />
           <Field path="roomSetC" />
-          <Field path="setback.on" />
-          <Field path="setback.nightC" />
-          <Field path="setback.fromHour" />
-          <Field path="setback.toHour" />
           <Field path="designOutdoorC" />
           <Field path="internalGainsW" />
+          <Field path="setback.on" />
+          <FieldsWhen
+            choices={['setback.on']}
+            matter={(on) => on === true}
+            fields={['setback.nightC', 'setback.fromHour', 'setback.toHour']}
+          />
         </FieldRow>
       </FormSection>
       <FormSection id="air" title="Air change">
@@ -120,16 +135,17 @@ export function HouseForm({ projectId, stored, currency, save, frieze }: HouseFo
       <FormSection id="emitters" title="Floor and radiators">
         <FieldRow>
           <Field path="emitters.kind" />
-          <Field path="emitters.floor.areaM2" />
-          <Field path="emitters.floor.spacingMm" />
-          <Field path="emitters.floor.screedMm" />
-          <Field path="emitters.floor.screedConductivity" />
-          <Field path="emitters.floor.coveringM2KPerW" />
-          <Field path="emitters.floor.downwardLoss" />
-          <Field path="emitters.radiators.ratedW" />
-          <Field path="emitters.radiators.exponent" />
-          <Field path="emitters.zones.share" />
-          <Field path="emitters.zones.floorShare" />
+          <FieldsWhen
+            choices={['emitters.kind']}
+            matter={(kind) => kind !== 'ideal'}
+            fields={EMITTERS}
+            reason="Ideal heating has no floor and no radiators; their figures are kept for the way back to water."
+          />
+          <FieldsWhen
+            choices={['emitters.kind', 'emitters.zones.share']}
+            matter={(kind, share) => kind !== 'ideal' && share === 'by zone'}
+            fields={['emitters.zones.floorShare']}
+          />
         </FieldRow>
       </FormSection>
       <FormSection id="hot-water" title="Hot water">
@@ -138,8 +154,16 @@ export function HouseForm({ projectId, stored, currency, save, frieze }: HouseFo
           <Field path="hotWater.setC" />
           <Field path="hotWater.profile" />
           <Field path="hotWater.exchanger" />
-          <Field path="hotWater.exchangerEffectiveness" />
-          <Field path="hotWater.coilWPerK" />
+          <FieldsWhen
+            choices={['hotWater.exchanger']}
+            matter={(exchanger) => exchanger !== 'coil'}
+            fields={['hotWater.exchangerEffectiveness']}
+          />
+          <FieldsWhen
+            choices={['hotWater.exchanger']}
+            matter={(exchanger) => exchanger === 'coil'}
+            fields={['hotWater.coilWPerK']}
+          />
           <Field path="hotWater.mainsMeanC" />
           <Field path="hotWater.mainsAmplitudeK" />
         </FieldRow>
@@ -153,10 +177,21 @@ export function HouseForm({ projectId, stored, currency, save, frieze }: HouseFo
         <FieldRow>
           <Field path="backup.fuel" />
           <Field path="backup.ratedW" />
-          <Field path="backup.seasonalEfficiency" />
-          <Field path="backup.heatPump.source" />
-          <Field path="backup.heatPump.groundC" />
-          <Field path="backup.heatPump.carnotShare" />
+          <FieldsWhen
+            choices={['backup.fuel']}
+            matter={(fuel) => fuel !== 'heat pump'}
+            fields={['backup.seasonalEfficiency']}
+          />
+          <FieldsWhen
+            choices={['backup.fuel']}
+            matter={(fuel) => fuel === 'heat pump'}
+            fields={['backup.heatPump.source', 'backup.heatPump.carnotShare']}
+          />
+          <FieldsWhen
+            choices={['backup.fuel', 'backup.heatPump.source']}
+            matter={(fuel, source) => fuel === 'heat pump' && source === 'ground'}
+            fields={['backup.heatPump.groundC']}
+          />
         </FieldRow>
       </FormSection>
     </SchemaForm>

@@ -5,8 +5,9 @@ import { useFieldArray, useFormContext, useWatch } from 'react-hook-form';
 import { z } from 'zod';
 import { quantityMeta } from '@/lib/schemas/quantity';
 import { unitInCurrency } from '@/lib/units/display';
+import { DayError } from './day-field';
 import { Field } from './field';
-import { metaOf } from './field-meta';
+import { isDay, metaOf } from './field-meta';
 import { useFormKnowledge } from './form-context';
 import { OriginMark, originOf } from './origin-mark';
 import { QuantityError } from './quantity-field';
@@ -17,6 +18,8 @@ export interface RowColumn {
   field: string;
   /** share of the width, as a CSS grid track */
   track: string;
+  /** word above the column where the field's own label does not say it */
+  head?: string;
 }
 
 interface RowTableProps {
@@ -29,6 +32,10 @@ interface RowTableProps {
   originField?: string;
   /** a column that is worked out from the row, with its head */
   derived?: { head: ReactNode; cell(index: number): ReactNode };
+  /** rows carry their number, so that what is said to them can name each other */
+  numbered?: boolean;
+  /** what is said to a row, below it */
+  rowNote?(index: number): ReactNode;
   /** sums under the columns, with the words that say of what */
   totals?: { words: string; cells: Readonly<Record<string, string>>; derived: string };
 }
@@ -53,9 +60,11 @@ function RowOrigin({ path }: { path: string }) {
 /** What is wrong with a cell, in words below its row. */
 export function CellError({ path }: { path: string }) {
   const { schema } = useFormKnowledge();
-  const meta = quantityMeta(schemaAt(schema, path));
+  const here = schemaAt(schema, path);
+  const meta = quantityMeta(here);
   const message = useFieldError(path);
   if (!message) return null;
+  if (isDay(here)) return <DayError path={path} id={`field-${path}-error`} />;
   return meta ? (
     <QuantityError path={path} meta={meta} id={`field-${path}-error`} />
   ) : (
@@ -80,7 +89,7 @@ function walkColumn(event: KeyboardEvent<HTMLElement>) {
 
 /** Rows of like things, typed as in a spreadsheet; on a phone each row stands by itself with its labels. */
 export function RowTable(props: RowTableProps) {
-  const { path, caption, columns, addWord, originField, derived } = props;
+  const { path, caption, columns, addWord, originField, derived, rowNote, numbered = false } = props;
   const { control, setFocus, getValues } = useFormContext();
   const { dropRow, currency } = useFormKnowledge();
   const rowSchema = useRowSchema(path);
@@ -89,6 +98,7 @@ export function RowTable(props: RowTableProps) {
   const addButton = useRef<HTMLButtonElement>(null);
   const first = columns[0]!.field;
   const template = [
+    ...(numbered ? ['1.5rem'] : []),
     ...columns.map(({ track }) => track),
     ...(derived ? ['4.5rem'] : []),
     ...(originField ? ['minmax(0,1.2fr)'] : []),
@@ -126,8 +136,13 @@ export function RowTable(props: RowTableProps) {
             role="row"
             className="hidden items-end gap-x-3 border-b border-ink pb-1 text-unit text-muted md:grid md:grid-cols-(--tracks)"
           >
-            {columns.map(({ field }) => (
-              <Head key={field} schema={schemaAt(rowSchema, field)} currency={currency} />
+            {numbered && (
+              <span role="columnheader">
+                <span className="sr-only">Row</span>
+              </span>
+            )}
+            {columns.map(({ field, head }) => (
+              <Head key={field} schema={schemaAt(rowSchema, field)} currency={currency} head={head} />
             ))}
             {derived && (
               <span role="columnheader" className="text-right">
@@ -147,17 +162,27 @@ export function RowTable(props: RowTableProps) {
               role="row"
               className="grid grid-cols-3 items-center gap-x-3 gap-y-1 py-1 rule-hair md:grid-cols-(--tracks)"
             >
-              {columns.map(({ field }, c) => (
+              {numbered && (
+                <div role="cell" className="text-right text-note text-muted max-md:hidden">
+                  {index + 1}
+                </div>
+              )}
+              {columns.map(({ field, head }, c) => (
                 <div
                   role="cell"
                   key={field}
                   className={c === 0 ? 'max-md:col-span-2 max-md:col-start-1 max-md:row-start-1' : ''}
                 >
-                  <PhoneLabel schema={schemaAt(rowSchema, field)} currency={currency} />
+                  <PhoneLabel
+                    schema={schemaAt(rowSchema, field)}
+                    currency={currency}
+                    head={head}
+                    row={numbered && c === 0 ? index + 1 : undefined}
+                  />
                   <Field
                     path={`${path}.${index}.${field}`}
                     inTable
-                    name={`${metaOf(schemaAt(rowSchema, field)).label}, row ${index + 1}`}
+                    name={`${head ?? metaOf(schemaAt(rowSchema, field)).label}, row ${index + 1}`}
                   />
                 </div>
               ))}
@@ -186,6 +211,7 @@ export function RowTable(props: RowTableProps) {
                 {columns.map(({ field }) => (
                   <CellError key={field} path={`${path}.${index}.${field}`} />
                 ))}
+                {rowNote?.(index)}
               </div>
             </div>
           ))}
@@ -245,21 +271,28 @@ function headWords(schema: z.ZodType, currency: string): { label: string; unit: 
   return { label: metaOf(schema).label, unit, number: meta !== undefined };
 }
 
-function Head({ schema, currency }: { schema: z.ZodType; currency: string }) {
+interface HeadProps {
+  schema: z.ZodType;
+  currency: string;
+  head: string | undefined;
+}
+
+function Head({ schema, currency, head }: HeadProps) {
   const { label, unit, number } = headWords(schema, currency);
   return (
     <span role="columnheader" className={number ? 'text-right' : ''}>
-      {label}
+      {head ?? label}
       {unit && <span className="block">{unit}</span>}
     </span>
   );
 }
 
-function PhoneLabel({ schema, currency }: { schema: z.ZodType; currency: string }) {
+function PhoneLabel({ schema, currency, head, row }: HeadProps & { row: number | undefined }) {
   const { label, unit } = headWords(schema, currency);
   return (
     <span aria-hidden="true" className="block text-note text-muted md:hidden">
-      {label} {unit}
+      {row !== undefined && `Row ${row}: `}
+      {head ?? label} {unit}
     </span>
   );
 }

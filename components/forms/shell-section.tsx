@@ -3,6 +3,7 @@
 import { transmissionWPerK } from '@/lib/physics/design-heat-load';
 import type { HouseRecord } from '@/lib/schemas/house';
 import { formatFixed, formatSignificant, withUnit } from '@/lib/units/display';
+import type { ReactNode } from 'react';
 import { get, useFormContext, useFormState } from 'react-hook-form';
 import { BigFigures } from './big-figures';
 import { FormSection } from './form-section';
@@ -27,7 +28,7 @@ function useRowsInError(): (index: number) => boolean {
 }
 
 /** The shell element by element, its sum, and where the heat goes. */
-export function ShellSection() {
+export function ShellSection({ children }: { children?: ReactNode }) {
   const house = useHeld<HouseRecord>();
   const inError = useRowsInError();
   const loss = houseLoss(house);
@@ -62,6 +63,7 @@ export function ShellSection() {
           derived: formatFixed(sumWPerK, 1),
         }}
       />
+      {children}
       <LossStones loss={loss} />
       <BigFigures
         figures={[

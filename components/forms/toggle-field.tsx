@@ -6,7 +6,7 @@ import type { FieldProps } from './field';
 import { metaOf } from './field-meta';
 
 /** Yes or no. */
-export function ToggleField({ path, schema, name }: FieldProps & { schema: z.ZodType }) {
+export function ToggleField({ path, schema, inTable = false, name }: FieldProps & { schema: z.ZodType }) {
   const { register } = useFormContext();
   const { label, help } = metaOf(schema);
   const id = `field-${path}`;
@@ -20,9 +20,9 @@ export function ToggleField({ path, schema, name }: FieldProps & { schema: z.Zod
           aria-describedby={`${id}-help`}
           className="size-4 accent-ink"
         />
-        {name ?? label}
+        <span className={inTable ? 'sr-only' : ''}>{name ?? label}</span>
       </label>
-      <p id={`${id}-help`} className="text-note text-muted">
+      <p id={`${id}-help`} className={inTable ? 'sr-only' : 'text-note text-muted'}>
         {help}
       </p>
     </div>

@@ -2,18 +2,24 @@ import { z } from 'zod';
 import { quantityMeta } from '@/lib/schemas/quantity';
 import { readNumber } from '@/lib/units/display';
 
-/** A record as it stands in a form: every number is the text that somebody typed. */
-export type Typed = string | boolean | Typed[] | { [key: string]: Typed };
+/** A record as it stands in a form: every number is the text that somebody typed; null where a part is left out. */
+export type Typed = string | boolean | null | Typed[] | { [key: string]: Typed };
 
 /** A number as form text: full precision, true minus. */
 export function typedNumber(value: number): string {
   return String(value).replace('-', '\u2212');
 }
 
-/** A schema without its default, so that its kind can be told. */
+/** A schema without its default and its leave to be absent, so that its kind can be told. */
 export function bare(schema: z.ZodType): z.ZodType {
-  const wrapped = schema instanceof z.ZodDefault || schema instanceof z.ZodPrefault;
+  const wrapped =
+    schema instanceof z.ZodDefault || schema instanceof z.ZodPrefault || schema instanceof z.ZodNullable;
   return wrapped ? bare(schema.unwrap() as z.ZodType) : schema;
+}
+
+/** Whether a part that may be left out is left out. */
+function isLeftOut(schema: z.ZodType, typed: unknown): boolean {
+  return (typed === null || typed === undefined) && schema.isNullable();
 }
 
 type Shape = Readonly<Record<string, z.ZodType>>;
@@ -62,6 +68,7 @@ export function schemaAt(schema: z.ZodType, path: string): z.ZodType {
 export function toTyped(schema: z.ZodType, stored: unknown): Typed {
   const here = bare(schema);
   const value = stored === undefined ? schema.parse(undefined) : stored;
+  if (value === null) return null;
   if (typeof value === 'number') return typedNumber(value);
   const element = elementOf(here);
   if (element) return (value as unknown[]).map((row) => toTyped(element, row));
@@ -78,6 +85,7 @@ export function toTyped(schema: z.ZodType, stored: unknown): Typed {
 
 /** Form text as a record that the schema can judge; text that is no number becomes NaN and never a default. */
 export function fromTyped(schema: z.ZodType, typed: Typed | undefined): unknown {
+  if (isLeftOut(schema, typed)) return null;
   if (quantityMeta(schema)) return readNumber(String(typed ?? '')) ?? Number.NaN;
   const here = bare(schema);
   const element = elementOf(here);
@@ -97,6 +105,7 @@ function holdLeaf(schema: z.ZodType, typed: Typed | undefined, last: unknown): u
 }
 
 function hold(schema: z.ZodType, typed: Typed | undefined, last: unknown): unknown {
+  if (isLeftOut(schema, typed)) return null;
   const here = bare(schema);
   const element = elementOf(here);
   if (element && Array.isArray(typed))

@@ -137,4 +137,22 @@ describe('the house form', () => {
     expect(page.input('Element, row 1').value).toBe('Walls');
     expect(words()).toContain('walls 84');
   });
+
+  it('says that the loss is that of the bills, and lets it go', async () => {
+    const save = vi.fn<Save>(async (_, version) => ({ ok: true, version: version + 1 }));
+    const calibration = { factor: 0.8, basis: 'bills' } as const;
+    page = await render(
+      <HouseForm
+        projectId="p1"
+        stored={{ data: { ...house, calibration }, version: 3 }}
+        currency="EUR"
+        save={save}
+      />,
+    );
+    expect(words()).toContain('Scaled to the fuel bills: × 0.80');
+    await page.press('Take the shell as entered again');
+    expect(words()).toContain('The loss is that of the shell and the air as entered.');
+    await page.press('Save');
+    expect(save.mock.calls[0]?.[0].calibration).toEqual({ factor: 1, basis: 'as entered' });
+  });
 });

@@ -48,7 +48,7 @@ export function ProjectNav({ projectId, projectName, designs }: ProjectNavProps)
           {projectName}
         </Link>
         <ul className="flex flex-wrap items-center gap-x-5">
-          {['House', 'Weather', 'Prices'].map((word) => {
+          {['House', 'Bills', 'Weather', 'Prices'].map((word) => {
             const href = `${base}/${word.toLowerCase()}`;
             return <NavLink key={word} href={href} word={word} current={path === href} />;
           })}
