@@ -57,13 +57,10 @@ export const billsSchema = z.object({
     label: 'A reading says',
     help: 'What was used between two dates, or what the meter showed on one day.',
   }),
-  fuel: z
-    .enum(['pellets', 'wood', 'gas', 'oil', 'liquid gas', 'electricity'])
-    .default('pellets')
-    .meta({
-      label: 'Fuel of the bills',
-      help: 'It offers the usual energy of a unit; nothing else depends on it.',
-    }),
+  fuel: z.enum(['pellets', 'wood', 'gas', 'oil', 'liquid gas', 'electricity']).default('pellets').meta({
+    label: 'Fuel of the bills',
+    help: 'It offers the usual energy of a unit; nothing else depends on it.',
+  }),
   unit: z.enum(['kg', 'L', 'm³', 'kWh']).default('kg').meta({
     label: 'Unit of the bills',
     help: 'Of the quantity in each row.',

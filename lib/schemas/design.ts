@@ -429,14 +429,10 @@ export const designSchema = z.object({
   name: shortName('Design', 'Film rows'),
   collector: collectorSchema,
   array: arraySchema,
-  second: z
-    .object({ collector: collectorSchema, array: arraySchema })
-    .nullable()
-    .default(null)
-    .meta({
-      label: 'Second field',
-      help: 'Collectors of another kind or another orientation on the same store.',
-    }),
+  second: z.object({ collector: collectorSchema, array: arraySchema }).nullable().default(null).meta({
+    label: 'Second field',
+    help: 'Collectors of another kind or another orientation on the same store.',
+  }),
   loop: loopSchema.prefault({}),
   controller: controllerSchema,
   store: storeSchema,

@@ -11,7 +11,7 @@ import { waveSolarW, waveWeather } from '@/lib/reference/wave-weather';
 /** ISO 13790:2008 annex C, synthetic years A6: the year loop with ideal set point on the same five houses. */
 describe('year loop with ideal set point against the hourly calculation of ISO 13790', () => {
   for (const capacityClass of Object.keys(WAVE_YEARS) as CapacityClass[]) {
-    it(`stays within 0.05 % of heat and 0.5 % of peak, class ${capacityClass}`, () => {
+    it(`stays within 0.05 % of heat and 0.5 % of peak, class ${capacityClass}`, async ({ annotate }) => {
       const [heating, peak, hoursHeating] = WAVE_YEARS[capacityClass];
       const design = demonstration.designs[0]!;
       const plan = new PlanBuilder().plan({
@@ -42,7 +42,7 @@ describe('year loop with ideal set point against the hourly calculation of ISO 1
       for (let month = 0; month < 12; month++) sum += monthSum(tally.monthJ, month, 'heating');
       const hours = tally.columns.backupHeatingW.filter((w) => w > 0).length;
       const top = Math.max(...tally.columns.backupHeatingW);
-      console.info(`${capacityClass}: ${hours} hours of heating, ${hoursHeating} by the hourly calculation`);
+      await annotate(`${hours} hours of heating, ${hoursHeating} by the hourly calculation`);
       expect(Math.abs(sum / J_PER_KWH / heating - 1)).toBeLessThan(5e-4);
       expect(Math.abs(top / peak - 1)).toBeLessThan(5e-3);
     });
