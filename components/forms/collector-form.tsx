@@ -1,47 +1,16 @@
 'use client';
 
 import type { ReactNode } from 'react';
-import { useFormContext, useWatch } from 'react-hook-form';
 import { designSchema, type DesignRecord } from '@/lib/schemas/design';
 import { Caution } from './caution';
+import { BuildFields, CurveFields, DryFields, PartsTable, PriceFields } from './collector-sections';
 import type { ContentsEntry } from './contents';
-import { DryKindField } from './dry-kind-field';
-import { Field } from './field';
-import { FieldRow, FormSection } from './form-section';
-import { GenericStart } from './generic-start';
-import { ModifierFields } from './modifier-fields';
-import { RowTable } from './row-table';
+import { FormSection } from './form-section';
 import { SchemaForm } from './schema-form';
+import { SecondField } from './second-field';
 import type { SaveAnswer, Stored } from './use-saving';
 
-const partSchema = designSchema.pick({ collector: true });
-
-const CURVE = [
-  'areaBasis',
-  'eta0Beam',
-  'b0',
-  'diffuseModifier',
-  'a1',
-  'a2',
-  'a3',
-  'a4',
-  'a6',
-  'a7',
-  'a8',
-  'dryCapacityJPerM2K',
-  'waterContentLPerM2',
-].map((field) => `collector.curve.${field}`);
-
-const BALANCE = [
-  'tauAlpha',
-  'absorberEmittance',
-  'coverEmittance',
-  'coverLongwaveTransmittance',
-  'gapMm',
-  'backLossWPerM2K',
-].map((field) => `collector.dry.${field}`);
-
-const DECLARED = ['stagnationC', 'backLossWPerM2K'].map((field) => `collector.dry.${field}`);
+const partSchema = designSchema.pick({ collector: true, second: true });
 
 const CONTENTS: readonly ContentsEntry[] = [
   {
@@ -53,20 +22,7 @@ const CONTENTS: readonly ContentsEntry[] = [
   { id: 'dry', title: 'Empty in the sun', fields: ['collector.dry', 'collector.faceLayerM2KPerW'] },
   { id: 'parts', title: 'Parts and limits', fields: ['collector.parts'] },
   { id: 'price', title: 'Price and life', fields: ['collector.pricePerM2', 'collector.replacements'] },
-];
-
-const PART_COLUMNS = [
-  { field: 'name', track: 'minmax(0,1.4fr)' },
-  { field: 'place', track: '6.5rem' },
-  { field: 'material', track: 'minmax(0,1fr)' },
-  { field: 'longTermLimitC', track: '5rem' },
-  { field: 'shortTermLimitC', track: '5rem' },
-];
-
-const REPLACEMENT_COLUMNS = [
-  { field: 'label', track: 'minmax(0,1.4fr)' },
-  { field: 'pricePerM2', track: '6rem' },
-  { field: 'everyYears', track: '6rem' },
+  { id: 'second', title: 'Second field', fields: ['second'] },
 ];
 
 interface CollectorFormProps {
@@ -77,21 +33,7 @@ interface CollectorFormProps {
   frieze?: ReactNode;
 }
 
-function DryFields() {
-  const { control } = useFormContext();
-  const kind: unknown = useWatch({ control, name: 'collector.dry.kind' });
-  return (
-    <FieldRow>
-      <DryKindField path="collector.dry.kind" />
-      {(kind === 'declared' ? DECLARED : BALANCE).map((path) => (
-        <Field key={path} path={path} />
-      ))}
-      <Field path="collector.faceLayerM2KPerW" />
-    </FieldRow>
-  );
-}
-
-/** The collector of one design: build, curve, what it bears empty, and what it costs. */
+/** The collectors of one design: build, curve, what they bear empty, and what they cost. */
 export function CollectorForm({ designId, stored, currency, save, frieze }: CollectorFormProps) {
   return (
     <SchemaForm
@@ -105,24 +47,13 @@ export function CollectorForm({ designId, stored, currency, save, frieze }: Coll
       frieze={frieze}
     >
       <FormSection id="build" title="Build">
-        <GenericStart />
-        <FieldRow>
-          <Field path="collector.name" />
-          <Field path="collector.origin" />
-          <Field path="collector.cover" />
-          <Field path="collector.widthFactor" />
-        </FieldRow>
+        <BuildFields path="collector" />
       </FormSection>
       <FormSection id="curve" title="Efficiency curve">
-        <FieldRow>
-          {CURVE.map((path) => (
-            <Field key={path} path={path} />
-          ))}
-        </FieldRow>
-        <ModifierFields />
+        <CurveFields path="collector" />
       </FormSection>
       <FormSection id="dry" title="Empty in the sun">
-        <DryFields />
+        <DryFields path="collector" />
         <Caution>
           An empty collector in full sun gets hot enough to burn skin, to soften plastics and to set off steam
           when water reaches it. The limits below are screening values: the maker’s data sheet and local fire
@@ -130,26 +61,36 @@ export function CollectorForm({ designId, stored, currency, save, frieze }: Coll
         </Caution>
       </FormSection>
       <FormSection id="parts" title="Parts and their limits">
-        <RowTable
-          path="collector.parts"
-          caption="Parts with the temperatures they bear"
-          columns={PART_COLUMNS}
-          addWord="Add a part"
-          originField="shortTermLimitC"
-        />
+        <PartsTable path="collector" caption="Parts with the temperatures they bear" />
       </FormSection>
       <FormSection id="price" title="Price and life">
-        <FieldRow>
-          <Field path="collector.pricePerM2" />
-        </FieldRow>
-        <RowTable
-          path="collector.replacements"
-          caption="What has to be replaced"
-          columns={REPLACEMENT_COLUMNS}
-          addWord="Add a replacement"
-          originField="everyYears"
-        />
+        <PriceFields path="collector" caption="What has to be replaced" />
       </FormSection>
+      <SecondField
+        firstArray={stored.data.array}
+        firstField="second.collector.name"
+        elsewhere="Save it here; its area, tilt, months and pipes then stand under Loop and store."
+      >
+        <SecondCollector />
+      </SecondField>
     </SchemaForm>
+  );
+}
+
+/** The collector of the second field, in the same figures as the first. */
+function SecondCollector() {
+  const path = 'second.collector';
+  return (
+    <>
+      <BuildFields path={path} />
+      <h3>Its efficiency curve</h3>
+      <CurveFields path={path} />
+      <h3>Empty in the sun</h3>
+      <DryFields path={path} />
+      <h3>Its parts and their limits</h3>
+      <PartsTable path={path} caption="Parts of the second field with the temperatures they bear" />
+      <h3>Its price and life</h3>
+      <PriceFields path={path} caption="What has to be replaced in the second field" />
+    </>
   );
 }

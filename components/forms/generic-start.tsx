@@ -6,16 +6,16 @@ import { genericCollectors } from '@/data/collectors/generic';
 import { collectorSchema } from '@/lib/schemas/collector';
 import { toTyped, type Typed } from './typed-values';
 
-/** Lays a generic class into the form; what stood there can be put back. */
-export function GenericStart() {
+/** Lays a generic class into the collector at a path; what stood there can be put back. */
+export function GenericStart({ path }: { path: string }) {
   const { setValue, getValues, trigger } = useFormContext();
   const [chosen, setChosen] = useState(genericCollectors[0]!.name);
   const [before, setBefore] = useState<Typed>();
   const id = useId();
 
   function lay(collector: Typed) {
-    setValue('collector', collector, { shouldDirty: true });
-    void trigger('collector');
+    setValue(path, collector, { shouldDirty: true });
+    void trigger(path);
   }
 
   return (
@@ -36,7 +36,7 @@ export function GenericStart() {
         onClick={() => {
           const collector = genericCollectors.find(({ name }) => name === chosen);
           if (!collector) return;
-          setBefore(getValues('collector') as Typed);
+          setBefore(getValues(path) as Typed);
           lay(toTyped(collectorSchema, collector));
         }}
       >

@@ -3,25 +3,20 @@
 import type { ReactNode } from 'react';
 import { designSchema, type DesignRecord } from '@/lib/schemas/design';
 import { formatFixed, formatSignificant, withUnit } from '@/lib/units/display';
+import { ArrayFields, PipeFields } from './array-fields';
 import { BigFigures } from './big-figures';
 import { Caution } from './caution';
 import type { ContentsEntry } from './contents';
 import { Field } from './field';
+import { FieldsWhen } from './fields-when';
 import { useHeld } from './form-context';
 import { FieldRow, FormSection } from './form-section';
-import { MonthsField } from './months-field';
 import { SchemaForm } from './schema-form';
+import { SecondField } from './second-field';
 import type { SaveAnswer, Stored } from './use-saving';
 
-const partSchema = designSchema.pick({
-  name: true,
-  array: true,
-  loop: true,
-  controller: true,
-  store: true,
-  supply: true,
-});
-type LoopAndStore = Pick<DesignRecord, 'name' | 'array' | 'loop' | 'controller' | 'store' | 'supply'>;
+const partSchema = designSchema.omit({ collector: true });
+type LoopAndStore = Omit<DesignRecord, 'collector'>;
 
 const CONTENTS: readonly ContentsEntry[] = [
   {
@@ -64,6 +59,7 @@ const CONTENTS: readonly ContentsEntry[] = [
       'loop.slabRoomLimitC',
     ],
   },
+  { id: 'second', title: 'Second field', fields: ['second'] },
   { id: 'controller', title: 'Controller', fields: ['controller'] },
   { id: 'store', title: 'Store', fields: ['store'] },
   { id: 'supply', title: 'Supply to the rooms', fields: ['supply'] },
@@ -77,27 +73,38 @@ interface LoopAndStoreFormProps {
   frieze?: ReactNode;
 }
 
+const VESSEL = ['loop.vesselReserveL', 'loop.vesselLossWPerK'];
+const STORE = [
+  'store.volumeL',
+  'store.heightM',
+  'store.shape',
+  'store.layers',
+  'store.insulationMm',
+  'store.insulationConductivity',
+  'store.insideHouse',
+];
+
 function Sums() {
-  const { array, store } = useHeld<LoopAndStore>();
+  const { array, second, store, loop } = useHeld<LoopAndStore>();
+  if (loop.layout === 'straight to the slab') return null;
+  const areaM2 = array.areaM2 + (second?.array.areaM2 ?? 0);
   const flowLPerMin = array.areaM2 * array.flowKgPerSM2 * 60;
-  return (
-    <BigFigures
-      figures={[
-        {
-          value: withUnit(array.areaM2 > 0 ? formatFixed(store.volumeL / array.areaM2) : '–', 'L/m²'),
-          words: 'store for each square metre of array',
-        },
-        {
-          value: withUnit(formatSignificant(flowLPerMin, 2), 'L/min'),
-          words: 'through the array while the pump runs',
-        },
-        {
-          value: withUnit(formatSignificant(store.volumeL / 1000 / store.heightM, 2), 'm²'),
-          words: 'footprint of the water, for its height',
-        },
-      ]}
-    />
-  );
+  const figures = [
+    {
+      value: withUnit(areaM2 > 0 ? formatFixed(store.volumeL / areaM2) : '–', 'L/m²'),
+      words: 'store for each square metre of array',
+    },
+    {
+      value: withUnit(formatSignificant(store.volumeL / 1000 / store.heightM, 2), 'm²'),
+      words: 'footprint of the water, for its height',
+    },
+  ];
+  if (loop.pump.kind === 'flow')
+    figures.push({
+      value: withUnit(formatSignificant(flowLPerMin, 2), 'L/min'),
+      words: `through the ${second ? 'first ' : ''}array while the pump runs`,
+    });
+  return <BigFigures figures={figures} />;
 }
 
 /** Array, pipes, controller, store and supply of one design. */
@@ -114,17 +121,9 @@ export function LoopAndStoreForm({ designId, stored, currency, save, frieze }: L
       frieze={frieze}
     >
       <FormSection id="array" title="The array">
-        <FieldRow>
+        <ArrayFields path="array">
           <Field path="name" />
-          <Field path="array.areaM2" />
-          <Field path="array.tiltDeg" />
-          <Field path="array.azimuthDeg" />
-          <Field path="array.rows" />
-          <Field path="array.rowSpacingM" />
-          <Field path="array.rowHeightM" />
-          <Field path="array.windFactor" />
-        </FieldRow>
-        <MonthsField path="array.mountedMonths" />
+        </ArrayFields>
         <Caution>
           Wind and snow load the array and what carries it: local code and a licensed engineer decide on
           fixings and roof.
@@ -132,16 +131,13 @@ export function LoopAndStoreForm({ designId, stored, currency, save, frieze }: L
       </FormSection>
       <FormSection id="loop" title="Pipes and pump">
         <FieldRow>
-          <Field path="array.liftM" />
-          <Field path="array.pipeLengthM" />
-          <Field path="array.pipeBoreMm" />
-          <Field path="array.pipeLossWPerMK" />
-          <Field path="array.pipeCapacityJPerMK" />
-          <Field path="array.flowKgPerSM2" />
-          <Field path="array.pumpEfficiency" />
+          <PipeFields path="array" />
           <Field path="loop.pump.kind" />
-          <Field path="loop.pump.shutOffHeadM" />
-          <Field path="loop.pump.greatestFlowLPerS" />
+          <FieldsWhen
+            choices={['loop.pump.kind']}
+            matter={(kind) => kind === 'curve'}
+            fields={['loop.pump.shutOffHeadM', 'loop.pump.greatestFlowLPerS']}
+          />
           <Field path="loop.pump.returnPipe" />
         </FieldRow>
         <Caution>
@@ -152,19 +148,44 @@ export function LoopAndStoreForm({ designId, stored, currency, save, frieze }: L
       <FormSection id="layout" title="Layout">
         <FieldRow>
           <Field path="loop.layout" />
-          <Field path="loop.exchangerEffectiveness" />
-          <Field path="loop.vesselReserveL" />
-          <Field path="loop.vesselLossWPerK" />
-          <Field path="loop.slabRoomLimitC" />
+          <FieldsWhen
+            choices={['loop.layout']}
+            matter={(layout) => layout === 'vessel with exchanger'}
+            fields={['loop.exchangerEffectiveness']}
+          />
+          <FieldsWhen
+            choices={['loop.layout']}
+            matter={(layout) => layout !== 'through the store'}
+            fields={VESSEL}
+          />
+          <FieldsWhen
+            choices={['loop.layout']}
+            matter={(layout) => layout === 'straight to the slab'}
+            fields={['loop.slabRoomLimitC']}
+          />
         </FieldRow>
       </FormSection>
+      <SecondField
+        firstArray={stored.data.array}
+        firstField="second.array.areaM2"
+        elsewhere="Save it here; its collectors then stand under Collector."
+      >
+        <ArrayFields path="second.array" />
+        <FieldRow>
+          <PipeFields path="second.array" />
+        </FieldRow>
+      </SecondField>
       <FormSection id="controller" title="Controller">
         <FieldRow>
           <Field path="controller.startK" />
           <Field path="controller.stopK" />
-          <Field path="controller.storeLimitC" />
           <Field path="controller.inhibitC" />
           <Field path="controller.minimumRunS" />
+          <FieldsWhen
+            choices={['loop.layout']}
+            matter={(layout) => layout !== 'straight to the slab'}
+            fields={['controller.storeLimitC']}
+          />
         </FieldRow>
         <Caution>
           Water let into a hot, empty array can flash to steam. Keep the array vented and the start inhibited
@@ -173,13 +194,13 @@ export function LoopAndStoreForm({ designId, stored, currency, save, frieze }: L
       </FormSection>
       <FormSection id="store" title="Store">
         <FieldRow>
-          <Field path="store.volumeL" />
-          <Field path="store.heightM" />
-          <Field path="store.layers" />
-          <Field path="store.insulationMm" />
-          <Field path="store.insulationConductivity" />
           <Field path="store.roomC" />
-          <Field path="store.insideHouse" />
+          <FieldsWhen
+            choices={['loop.layout']}
+            matter={(layout) => layout !== 'straight to the slab'}
+            fields={STORE}
+            reason="Straight to the slab there is no store; its figures are kept. The room is that of the vessel."
+          />
         </FieldRow>
         <Sums />
       </FormSection>

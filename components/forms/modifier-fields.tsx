@@ -1,18 +1,16 @@
 'use client';
 
-import { useFormContext, useWatch } from 'react-hook-form';
+import { get, useFormContext, useWatch } from 'react-hook-form';
 import {
   diffuseModifierFromPair,
   diffuseModifierFromTable,
   type IncidenceModifier,
 } from '@/lib/physics/incidence-angle';
-import type { DesignRecord } from '@/lib/schemas/design';
 import { formatFixed } from '@/lib/units/display';
 import { Field } from './field';
 import { useHeld } from './form-context';
 import { CellError } from './row-table';
 
-const PATH = 'collector.curve.modifier';
 const ANGLES_DEG = Array.from({ length: 10 }, (_, i) => i * 10);
 
 const KINDS = [
@@ -44,9 +42,9 @@ function AngleTable({ path, caption }: { path: string; caption: string }) {
 }
 
 /** What the tables say of diffuse sun, beside the Kd that the curve goes by. */
-function DiffuseNote() {
-  const { modifier } = useHeld<Pick<DesignRecord, 'collector'>>().collector.curve;
-  const fromTables = hemisphere(modifier);
+function DiffuseNote({ path }: { path: string }) {
+  const modifier = get(useHeld(), path) as IncidenceModifier | undefined;
+  const fromTables = modifier && hemisphere(modifier);
   if (fromTables === undefined) return null;
   return (
     <p className="text-note text-muted" aria-live="polite">
@@ -63,17 +61,17 @@ function hemisphere(modifier: IncidenceModifier): number | undefined {
 }
 
 /** How the beam's modifier is known: b0, one table, or two for ribbed sheet and tubes. */
-export function ModifierFields() {
+export function ModifierFields({ path }: { path: string }) {
   const { control, register } = useFormContext();
-  const kind: unknown = useWatch({ control, name: `${PATH}.kind` });
-  const id = `field-${PATH}.kind`;
+  const kind: unknown = useWatch({ control, name: `${path}.kind` });
+  const id = `field-${path}.kind`;
   return (
     <div className="space-y-4">
       <div className="max-w-sm">
         <label htmlFor={id} className="mb-1 block">
           Incidence angle by
         </label>
-        <select id={id} {...register(`${PATH}.kind`)} className="field w-full">
+        <select id={id} {...register(`${path}.kind`)} className="field w-full">
           {KINDS.map(({ value, label }) => (
             <option key={value} value={value}>
               {label}
@@ -81,17 +79,17 @@ export function ModifierFields() {
           ))}
         </select>
       </div>
-      {kind === 'table' && <AngleTable path={`${PATH}.values`} caption="Modifier K" />}
+      {kind === 'table' && <AngleTable path={`${path}.values`} caption="Modifier K" />}
       {kind === 'pair' && (
         <>
-          <AngleTable path={`${PATH}.longitudinal`} caption="K along the ribs" />
-          <AngleTable path={`${PATH}.transversal`} caption="K across the ribs" />
+          <AngleTable path={`${path}.longitudinal`} caption="K along the ribs" />
+          <AngleTable path={`${path}.transversal`} caption="K across the ribs" />
           <div className="max-w-sm">
-            <Field path={`${PATH}.ribs`} />
+            <Field path={`${path}.ribs`} />
           </div>
         </>
       )}
-      <DiffuseNote />
+      <DiffuseNote path={path} />
     </div>
   );
 }

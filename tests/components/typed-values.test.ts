@@ -41,6 +41,18 @@ describe('records as form text', () => {
     expect(schemaAt(grown, 'extra.on').parse(undefined)).toBe(true);
   });
 
+  it('leaves out a part that is left out, and gives it back whole where it is there', () => {
+    const plan = z.object({ store: z.object({ volume }).nullable().default(null) });
+    expect(toTyped(plan, {})).toEqual({ store: null });
+    expect(fromTyped(plan, { store: null })).toEqual({ store: null });
+    expect(fromTyped(plan, { store: { volume: '500' } })).toEqual({ store: { volume: 500 } });
+    expect(heldValues(plan, { store: { volume: 'x' } }, { store: { volume: 700 } })).toEqual({
+      store: { volume: 700 },
+    });
+    expect(heldValues(plan, { store: null }, { store: { volume: 700 } })).toEqual({ store: null });
+    expect(quantityMeta(schemaAt(plan, 'store.volume'))?.label).toBe('Volume');
+  });
+
   it('never turns text that is no number into a default', () => {
     for (const text of ['', '  ', 'warm', '1.2.3'])
       expect(z.object({ volume }).safeParse(fromTyped(z.object({ volume }), { volume: text })).success).toBe(
