@@ -2,6 +2,7 @@
  * The same engine from the command line:
  *
  *   npm run --silent simulate -- design.json weather.epw [--columns] [--repair]
+ *   npm run --silent simulate -- design.json upland-u46    with a climate that ships with the application
  *   npm run --silent simulate -- --example        a design file to start from
  *   npm run --silent simulate -- --schema         the JSON Schema of design files
  *
@@ -10,6 +11,7 @@
 import { createHash } from 'node:crypto';
 import { readFileSync } from 'node:fs';
 import { z } from 'zod';
+import { climateYear } from '@/data/climates/climates';
 import { demonstration } from '@/data/demonstration/larkspur-house';
 import { findings } from '@/lib/checks/findings';
 import { designCost } from '@/lib/economics/design-cost';
@@ -20,7 +22,7 @@ import { readWeather } from '@/lib/weather/read-weather';
 import type { WeatherYear } from '@/lib/weather/weather-year';
 
 const USAGE =
-  'Usage: npm run simulate -- design.json weather-file [--columns] [--repair] | --example | --schema';
+  'Usage: npm run simulate -- design.json weather-file|climate [--columns] [--repair] | --example | --schema';
 
 function fail(message: string): never {
   process.stderr.write(`${message}\n`);
@@ -73,7 +75,7 @@ else if (flags.has('--example')) {
 } else {
   if (!designPath || !weatherPath) fail(USAGE);
   const file = readDesign(designPath);
-  const weather = readYear(weatherPath, flags.has('--repair'));
+  const weather = climateYear(weatherPath) ?? readYear(weatherPath, flags.has('--repair'));
   const outcome = createSimulator().run({ weather, ...file });
   if (!outcome.ok) fail(outcome.message);
   const { columns, ...result } = outcome.result;

@@ -73,7 +73,7 @@ export function forDesigns(
   const details = fc.check(property, {
     numRuns: 1,
     seed: SEED,
-    path: first.counterexamplePath,
+    path: first.counterexamplePath ?? '',
     interruptAfterTimeLimit: SIMPLIFY_MS,
   });
   const { counterexample, errorInstance, numShrinks } = details.counterexample ? details : first;
