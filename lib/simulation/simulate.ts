@@ -1,5 +1,5 @@
 import { HouseNetwork } from '@/lib/physics/house-network';
-import { HOURS_PER_DAY } from '@/lib/units/constants';
+import { HOURS_PER_DAY, MONTH_START_HOUR } from '@/lib/units/constants';
 import type { WeatherYear } from '@/lib/weather/weather-year';
 import type { Design, House, Numerics } from './design';
 import { assembleResult } from './assemble-result';
@@ -7,7 +7,7 @@ import { PlanBuilder } from './build-plan';
 import type { DryColumns } from './dry-hours';
 import type { Plan } from './plan';
 import type { YearResult } from './results';
-import { createColumns, Tally } from './tally';
+import { Tally } from './tally';
 import { runYear, YearState, type YearStatus } from './year';
 
 export interface SimulationInput {
@@ -40,11 +40,23 @@ export interface Simulator {
   run(input: SimulationInput): YearOutcome;
 }
 
-/** Runs a pre-year that sets the initial state, then the year that is booked (model.md section 12: one pre-run year). */
+/** The pre-period: November and December, many times what store and walls remember. */
+const PRE_PERIOD_FROM_H = MONTH_START_HOUR[10]!;
+/** Change of stored heat over the year / heat that went in, above which the year is run once more [-]. */
+const STORED_TOLERANCE = 1e-4;
+const MOST_YEARS = 3;
+
+/**
+ * Runs the last two months to set the initial state, then the year that is booked; again while the heat stored at
+ * its end differs from that at its start by more than the tolerance. The change is reported in the balance.
+ */
 export function runPlan(plan: Plan, tally: Tally): { status: YearStatus; state: YearState } {
   const state = new YearState(plan);
-  let status = runYear(plan, state, tally);
-  if (status === 'done') status = runYear(plan, state, tally);
+  let status = runYear(plan, state, tally, PRE_PERIOD_FROM_H);
+  for (let year = 0; year < MOST_YEARS && status === 'done'; year++) {
+    status = runYear(plan, state, tally);
+    if (tally.storedShare() <= STORED_TOLERANCE) break;
+  }
   return { status, state };
 }
 
@@ -78,7 +90,6 @@ export function createSimulator(): Simulator {
       const need = reference(input);
       if ('ok' in need) return need;
       const tally = new Tally(plan.layers);
-      tally.columns = createColumns(plan.layers);
       const { status, state } = runPlan(plan, tally);
       if (status !== 'done') return failure(status, state);
       return { ok: true, result: assembleResult(input, plan, state, tally, need, dryFields(builder, input)) };

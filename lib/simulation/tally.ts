@@ -150,6 +150,13 @@ export class Tally {
     return { needKwh: need * KWH_PER_J, unmetKwh: unmet * KWH_PER_J, boughtKwh: this.boughtJ * KWH_PER_J };
   }
 
+  /** Change of stored heat over the year / heat that went in [-]. */
+  storedShare(): number {
+    const change = this.changeJ.reduce((sum, heatJ) => sum + heatJ, 0);
+    const input = this.arraySunJ + this.backupJ + this.windowSunJ + this.internalJ;
+    return input > 0 ? Math.abs(change) / input : 0;
+  }
+
   private noteStored(state: YearState, into: Float64Array): void {
     into.fill(0);
     for (const loop of state.loops) {

@@ -88,9 +88,10 @@ export class YearState {
  * @param plan what does not change
  * @param state bodies at the start, moved to the end of the year
  * @param tally columns and sums of this year, overwritten
+ * @param firstHour hour of the year to begin with [h]; later than 0 for the pre-period
  * @returns 'done', or why the run was given up
  */
-export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus {
+export function runYear(plan: Plan, state: YearState, tally: Tally, firstHour = 0): YearStatus {
   const { network, store, loops } = state;
   const fields = fieldsOf(plan);
   const flows = store.flows;
@@ -111,7 +112,7 @@ export function runYear(plan: Plan, state: YearState, tally: Tally): YearStatus 
   flows.mainsC = columns.mainsC[0]!;
   flows.effectiveness = plan.exchangerEffectiveness;
 
-  for (let h = 0; h < HOURS_PER_YEAR; h++) {
+  for (let h = firstHour; h < HOURS_PER_YEAR; h++) {
     const outdoorC = columns.outdoorC[h]!;
     const roomSetC = columns.roomSetC[h]!;
     const windowSunW = columns.windowSunW[h]!;
