@@ -4,6 +4,7 @@ import { demonstration } from '@/data/demonstration/larkspur-house';
 import { heatPumpCop } from '@/lib/physics/heat-pump';
 import { houseSchema, type HouseRecord } from '@/lib/schemas/house';
 import { createSimulator } from '@/lib/simulation/simulate';
+import { WH_PER_KWH } from '@/lib/units/constants';
 
 const weather = climates[0]!.weatherYear();
 const simulator = createSimulator();
@@ -58,6 +59,16 @@ describe('heat pump as backup', () => {
     expect(mean).toBeGreaterThan(heatPumpCop(3, house.hotWater.setC));
     expect(mean).toBeLessThan(heatPumpCop(3, house.roomSetC + 1));
     expect(pumped.year.fractions.savedThermal).toBeGreaterThan(0);
+  });
+
+  it('buys for the taps at their own temperature and for the rooms at that of the loop', () => {
+    const { backupHeatingW, backupTapW, supplyC } = pumped.columns;
+    let boughtWh = 0;
+    for (let h = 0; h < supplyC.length; h++) {
+      boughtWh += backupTapW[h]! / heatPumpCop(3, house.hotWater.setC);
+      if (backupHeatingW[h]! > 0) boughtWh += backupHeatingW[h]! / heatPumpCop(3, supplyC[h]!);
+    }
+    expect(Math.abs(boughtWh / WH_PER_KWH / pumped.year.boughtKwh - 1)).toBeLessThan(1e-4);
   });
 
   it('buys more with a colder source', () => {
