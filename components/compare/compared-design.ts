@@ -5,6 +5,7 @@ import type { ReceiptKind } from '@/lib/economics/cost-of-heat';
 import type { DesignRecord } from '@/lib/schemas/design';
 import type { HouseRecord } from '@/lib/schemas/house';
 import type { Prices } from '@/lib/schemas/prices';
+import { builtFields } from '@/lib/simulation/built-fields';
 import type { YearResult } from '@/lib/simulation/results';
 import { HOURS_PER_YEAR } from '@/lib/units/constants';
 
@@ -12,8 +13,10 @@ import { HOURS_PER_YEAR } from '@/lib/units/constants';
 export interface ComparedDesign {
   id: string;
   name: string;
+  /** of all fields together */
   areaM2: number;
-  cover: DesignRecord['collector']['cover'];
+  /** the collector fields that are built: none, one or two */
+  fields: { areaM2: number; cover: DesignRecord['collector']['cover'] }[];
   volumeL: number;
   weatherName: string;
   synthetic: boolean;
@@ -79,6 +82,7 @@ export function comparedDesign(
   result: YearResult,
 ): ComparedDesign {
   const { year } = result;
+  const built = builtFields(design);
   const cost = designCost(design, prices, result);
   const stones = new Uint8Array(HOURS_PER_YEAR);
   packCarriers(result.columns, stones);
@@ -88,8 +92,8 @@ export function comparedDesign(
   return {
     id,
     name: design.name,
-    areaM2: design.array.areaM2,
-    cover: design.collector.cover,
+    areaM2: built.reduce((sum, { array }) => sum + array.areaM2, 0),
+    fields: built.map(({ array, collector }) => ({ areaM2: array.areaM2, cover: collector.cover })),
     volumeL: design.store.volumeL,
     weatherName: result.weatherName,
     synthetic: result.synthetic,
@@ -104,7 +108,7 @@ export function comparedDesign(
     toBuild: cost.toBuild,
     runningPerYear:
       cost.boughtMoneyPerYear + presentUpkeep * annuityFactor(prices.realRate / 100, prices.years),
-    replaces: design.collector.replacements.length > 0 && design.array.areaM2 > 0,
+    replaces: built.some(({ collector }) => collector.replacements.length > 0),
     hotHours: stones.reduce((sum, stone) => sum + (stone === HOT_STONE ? 1 : 0), 0),
     hotPart: worstPart(result),
     receipt: cost.heat.receipt.map(({ kind, label, perKwh }) => ({ kind, label, perKwh })),

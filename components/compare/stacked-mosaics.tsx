@@ -18,7 +18,7 @@ const VIEWS: readonly { value: View; label: string }[] = [
   { value: 'changes', label: 'Hours that change hands' },
 ];
 
-const COVER_WORDS: Record<ComparedDesign['cover'], string> = {
+const COVER_WORDS: Record<ComparedDesign['fields'][number]['cover'], string> = {
   none: 'bare absorbers',
   film: 'one film over soft mats',
   glass: 'one glass over black mats',
@@ -29,7 +29,10 @@ const COVER_WORDS: Record<ComparedDesign['cover'], string> = {
 const hours = (count: number) => formatFixed(count);
 
 function aboutWords(design: ComparedDesign, changes: Changes | undefined, first: string): string {
-  const build = `${withUnit(formatTyped(design.areaM2), 'm²')}, ${COVER_WORDS[design.cover]}, ${withUnit(formatTyped(design.volumeL), 'L')}`;
+  const fields = design.fields.map(
+    ({ areaM2, cover }) => `${withUnit(formatTyped(areaM2), 'm²')}, ${COVER_WORDS[cover]}`,
+  );
+  const build = `${fields.join('; ') || 'no array'}${fields.length > 1 ? '; ' : ', '}${withUnit(formatTyped(design.volumeL), 'L')}`;
   if (!changes) return `${build}: the measure for the others`;
   const gain = changes.backupToSun >= changes.sunToBackup;
   const kind = gain

@@ -1,6 +1,7 @@
 import type { Finding } from '@/lib/checks/findings';
 import { dryModelSchema } from '@/lib/schemas/collector';
 import type { CollectorRecord } from '@/lib/schemas/collector';
+import { OF_SECOND_FIELD } from '@/lib/simulation/built-fields';
 import type { PartDryness } from '@/lib/simulation/results';
 import type { StudyAnswer } from '@/lib/study/study-question';
 import { formatFixed, withUnit } from '@/lib/units/display';
@@ -17,7 +18,8 @@ export function explainFinding(finding: Finding, { design, result }: StudyAnswer
     href: `/method/checks#rule-${finding.id.replaceAll(' ', '-')}`,
   };
   const part = result.dryParts.find(({ name, material }) => finding.text.includes(`${name} (${material})`));
-  if (part) return explainDry(part, finding, design.collector, rule);
+  const second = part?.name.endsWith(OF_SECOND_FIELD) ? design.second : null;
+  if (part) return explainDry(part, finding, (second ?? design).collector, rule);
   return {
     title: `Check ${finding.id}`,
     value: finding.severity,

@@ -76,14 +76,24 @@ export function coefficientInput(
   return input.origin === 'typed' ? { ...input, ...OF_COLLECTOR[collector.origin] } : input;
 }
 
-/** The entered numbers that move a year most. */
-export function designInputs({ array, collector, store, supply }: DesignRecord): ExplainedInput[] {
+function fieldInputs({ array, collector }: Pick<DesignRecord, 'array' | 'collector'>): ExplainedInput[] {
   return [
     enteredInput(arraySchema.shape.areaM2, array.areaM2),
     enteredInput(arraySchema.shape.tiltDeg, array.tiltDeg),
     coefficientInput(collector, 'eta0Beam'),
     coefficientInput(collector, 'a1'),
     coefficientInput(collector, 'a2'),
+  ];
+}
+
+/** The entered numbers that move a year most. */
+export function designInputs(design: DesignRecord): ExplainedInput[] {
+  const { second, store, supply } = design;
+  return [
+    ...fieldInputs(design),
+    ...(second
+      ? fieldInputs(second).map((input) => ({ ...input, name: `Second field: ${input.name}` }))
+      : []),
     enteredInput(storeSchema.shape.volumeL, store.volumeL),
     enteredInput(supplySchema.shape.designSupplyC, supply.designSupplyC),
   ];

@@ -1,5 +1,6 @@
 import { clock, dayName } from '@/components/mosaic/calendar';
 import { partsOverLimit } from '@/components/mosaic/stones';
+import { OF_SECOND_FIELD } from '@/lib/simulation/built-fields';
 import { CARRIERS } from '@/lib/simulation/results';
 import type { Carrier } from '@/lib/simulation/results';
 import type { StudyAnswer } from '@/lib/study/study-question';
@@ -42,7 +43,12 @@ function carrierAt(answer: StudyAnswer, hour: number): Carrier {
 }
 
 function tooHotParts(answer: StudyAnswer, hour: number): string[] {
-  return partsOverLimit(answer.result.columns.overLimit[hour]!, answer.design.collector.parts);
+  const { collector, second } = answer.design;
+  const parts = [
+    ...collector.parts,
+    ...(second?.collector.parts ?? []).map((part) => ({ ...part, name: part.name + OF_SECOND_FIELD })),
+  ];
+  return partsOverLimit(answer.result.columns.overLimit[hour]!, parts);
 }
 
 /** What a screen reader says of the stone under the cursor. */

@@ -1,4 +1,5 @@
 import type { HouseRecord } from '@/lib/schemas/house';
+import { builtFields } from '@/lib/simulation/built-fields';
 import type { StudyAnswer } from '@/lib/study/study-question';
 import { formatShare, formatSignificant, formatTyped, withUnit } from '@/lib/units/display';
 import { backupSchema } from '@/lib/schemas/house';
@@ -48,19 +49,8 @@ export function explain(
   const perKg = enteredInput(pricesSchema.shape.fuelKwhPerKg, prices.fuelKwhPerKg);
   switch (number) {
     case 'area':
-      return {
-        title: 'Array area',
-        value: withUnit(formatTyped(design.array.areaM2), 'm²'),
-        equation: 'An input: the lever below sets it.',
-        inputs: [
-          enteredInput(arraySchema.shape.areaM2, design.array.areaM2),
-          { name: 'area basis of the curve', value: design.collector.curve.areaBasis },
-          enteredInput(collectorSchema.shape.widthFactor, design.collector.widthFactor),
-          { name: 'collected per square metre', value: kwh(year.collectedKwh / design.array.areaM2) },
-        ],
-        source: 'Area basis as in ISO 9806.',
-        method: [COLLECTOR_CURVE, equationLink('Another area basis', 'collector', 'toAreaBasis')],
-      };
+    case 'secondArea':
+      return explainArea(number, answer);
     case 'share':
       return {
         title: 'Share carried by the sun',
@@ -120,6 +110,29 @@ export function explain(
         method: [YEAR_LOOP, equationLink('Heat loss of the house', 'house', 'houseHeat'), CHOICES_LINK],
       };
   }
+}
+
+/** Opens the area of one of the two fields. */
+function explainArea(number: 'area' | 'secondArea', { design, result: { year } }: StudyAnswer): Explanation {
+  const { collector, array } = (number === 'secondArea' && design.second) || design;
+  const fields = builtFields(design);
+  const wholeM2 = fields.reduce((sum, field) => sum + field.array.areaM2, 0);
+  return {
+    title: number === 'area' ? 'Array area' : 'Area of the second field',
+    value: withUnit(formatTyped(array.areaM2), 'm²'),
+    equation: `An input: ${number === 'area' ? 'the lever below sets it' : 'the form “Loop and store” sets it'}.`,
+    inputs: [
+      enteredInput(arraySchema.shape.areaM2, array.areaM2),
+      { name: 'area basis of the curve', value: collector.curve.areaBasis },
+      enteredInput(collectorSchema.shape.widthFactor, collector.widthFactor),
+      {
+        name: `collected per square metre${fields.length > 1 ? ' of both fields' : ''}`,
+        value: kwh(year.collectedKwh / wholeM2),
+      },
+    ],
+    source: 'Area basis as in ISO 9806.',
+    method: [COLLECTOR_CURVE, equationLink('Another area basis', 'collector', 'toAreaBasis')],
+  };
 }
 
 /** The entered prices behind a cost of heat. */

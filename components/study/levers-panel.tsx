@@ -4,12 +4,14 @@ import type { ReactNode } from 'react';
 import { monthOrder } from '@/components/mosaic/calendar';
 import type { DesignRecord } from '@/lib/schemas/design';
 import type { StudyAnswer, StudyQuestion } from '@/lib/study/study-question';
+import { formatTyped, withUnit } from '@/lib/units/display';
 import { CoverLever } from './cover-lever';
 import { LeverRow } from './lever-row';
 import { coverChoices, leverOf, withCollector, withMonths } from './levers';
 import type { LeverId } from './levers';
 import { MonthsLever } from './months-lever';
 import { traceRange, useTraces } from './use-traces';
+import { COLLECTOR_WORDS } from './verdict-words';
 
 interface LeversPanelProps {
   design: DesignRecord;
@@ -49,6 +51,13 @@ export function LeversPanel(props: LeversPanelProps) {
         <h2 id="levers-heading">Six levers</h2>
         <p className="text-note text-muted">trace: heat still bought, MWh a year</p>
       </div>
+      {design.second && (
+        <p className="pt-1 text-note text-muted">
+          Area, cover, tilt and months move the first field. The second,{' '}
+          {withUnit(formatTyped(design.second.array.areaM2), 'm²')} of{' '}
+          {COLLECTOR_WORDS[design.second.collector.cover]}, stays as it is saved.
+        </p>
+      )}
       {row('area')}
       <CoverLever
         choices={coverChoices(saved)}

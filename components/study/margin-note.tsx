@@ -15,7 +15,6 @@ interface MarginNoteProps {
 
 /** Beside the verdict: which weather, how the array stands, what was saved, and what stops the design. */
 export function MarginNote({ weather, design, answer, saved }: MarginNoteProps) {
-  const months = design.array.mountedMonths.filter(Boolean).length;
   const stops = answer?.findings.filter((finding) => finding.severity === 'stop').length ?? 0;
   return (
     <aside
@@ -29,8 +28,10 @@ export function MarginNote({ weather, design, answer, saved }: MarginNoteProps) 
             , <i>synthetic</i>
           </>
         )}
-        . Array at {withUnit(formatTyped(design.array.tiltDeg), '°')},{' '}
-        {months === 12 ? 'all year' : `${months} months`}.
+        .{' '}
+        {design.second
+          ? `First field at ${stands(design.array)}; second at ${stands(design.second.array)}.`
+          : `Array at ${stands(design.array)}.`}
       </p>
       {stops > 0 && (
         <p className="mt-1 text-hot-text">
@@ -46,6 +47,11 @@ export function MarginNote({ weather, design, answer, saved }: MarginNoteProps) 
       )}
     </aside>
   );
+}
+
+function stands({ tiltDeg, mountedMonths }: DesignRecord['array']): string {
+  const months = mountedMonths.filter(Boolean).length;
+  return `${withUnit(formatTyped(tiltDeg), '°')}, ${months === 12 ? 'all year' : `${months} months`}`;
 }
 
 function backupMwh({ result: { year } }: StudyAnswer): string {

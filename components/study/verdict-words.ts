@@ -1,6 +1,8 @@
 import type { HouseRecord } from '@/lib/schemas/house';
+import type { DesignRecord } from '@/lib/schemas/design';
 import type { Prices } from '@/lib/schemas/prices';
 import type { CollectorRecord } from '@/lib/schemas/collector';
+import { builtFields } from '@/lib/simulation/built-fields';
 import type { StudyAnswer } from '@/lib/study/study-question';
 import {
   currencySign,
@@ -11,7 +13,7 @@ import {
   withUnit,
 } from '@/lib/units/display';
 
-export type VerdictNumber = 'area' | 'share' | 'price' | 'fuel' | 'reference';
+export type VerdictNumber = 'area' | 'secondArea' | 'share' | 'price' | 'fuel' | 'reference';
 
 /** A run of words, or a number that opens how it was computed. */
 export type VerdictPart = string | { number: VerdictNumber; text: string };
@@ -50,13 +52,25 @@ export function pricePerKwh(price: number, currency: string): string {
   return withUnit(formatFixed(price, 3), `${currencySign(currency)}/kWh`);
 }
 
+/** "24 m² of film-covered absorbers", and those of a second field where there is one. */
+function fieldParts(design: DesignRecord): VerdictPart[] {
+  return builtFields(design).flatMap(({ collector, array }, place): VerdictPart[] => [
+    ...(place > 0 ? [' and '] : []),
+    {
+      number: array === design.array ? 'area' : 'secondArea',
+      text: withUnit(formatTyped(array.areaM2), 'm²'),
+    },
+    ` of ${COLLECTOR_WORDS[collector.cover]}`,
+  ]);
+}
+
 /** The verdict: what the array carries, at what price, and what is still bought instead of what. */
 export function verdictParts(answer: StudyAnswer, house: HouseRecord, prices: Prices): VerdictPart[] {
   const { design, result, cost } = answer;
   const { verb, noun } = FUEL_WORDS[house.backup.fuel];
   const bought = fuelAmount(result.year.boughtKwh, house, prices);
   const reference = fuelAmount(result.year.referenceBoughtKwh, house, prices);
-  if (design.array.areaM2 === 0 || !(result.year.fractions.solar > 0)) {
+  if (builtFields(design).length === 0 || !(result.year.fractions.solar > 0)) {
     return [
       'Without sun on the array nothing is carried: ',
       `${verb} `,
@@ -66,8 +80,8 @@ export function verdictParts(answer: StudyAnswer, house: HouseRecord, prices: Pr
   }
   return [
     'With ',
-    { number: 'area', text: withUnit(formatTyped(design.array.areaM2), 'm²') },
-    ` of ${COLLECTOR_WORDS[design.collector.cover]} the sun carries `,
+    ...fieldParts(design),
+    ' the sun carries ',
     { number: 'share', text: formatShare(result.year.fractions.solar) },
     ' of this house’s heat at ',
     { number: 'price', text: pricePerKwh(cost.heat.perKwh, prices.currency) },

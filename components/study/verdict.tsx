@@ -13,6 +13,7 @@ import type { VerdictNumber } from './verdict-words';
 /** The course of stones on which a number stands, in the colour of its meaning. */
 const COURSES: Record<VerdictNumber, string> = {
   area: 'course-ink',
+  secondArea: 'course-ink',
   share: 'course-sun',
   price: 'course-ink',
   fuel: 'course-backup',

@@ -1,3 +1,4 @@
+import { builtFields } from '@/lib/simulation/built-fields';
 import type { CheckSubject } from './findings';
 
 /** An input and the range in which the equation that reads it was established. */
@@ -36,8 +37,10 @@ export const EQUATION_RANGES: readonly EquationRange[] = [
     low: 0,
     high: 75,
     equation: 'Hollands et al. 1976, gap convection (its value at 75° is held)',
-    value: ({ design }) =>
-      design.array.areaM2 > 0 && design.collector.dry.kind === 'balance' ? design.array.tiltDeg : undefined,
+    value: ({ design }) => {
+      const balanced = builtFields(design).filter(({ collector }) => collector.dry.kind === 'balance');
+      return balanced.length > 0 ? Math.max(...balanced.map(({ array }) => array.tiltDeg)) : undefined;
+    },
   },
   {
     name: 'radiator exponent',

@@ -1,6 +1,7 @@
 import { FLOOR_LIMITS } from '@/lib/physics/floor';
 import type { PartDryness } from '@/lib/simulation/results';
 import { pumpDuty } from '@/lib/simulation/build-plan';
+import { builtFields } from '@/lib/simulation/built-fields';
 import { emitterLoop, houseHeat } from '@/lib/simulation/house-heat';
 import { shortestNoonShadow } from '@/lib/sun/row-shading';
 import { formatFixed, formatShare, formatSignificant, withUnit } from '@/lib/units/display';
@@ -32,6 +33,8 @@ const SOFT_ABSORBER_L_PER_M2 = 3;
 
 const celsius = (value: number) => withUnit(formatFixed(value), '°C');
 const hoursText = (hours: number) => (hours === 1 ? 'one hour' : `${formatFixed(hours)} hours`);
+/** " of the second field" where a design has two. */
+const of = (name: string) => (name === 'array' ? '' : ` of the ${name}`);
 const when = (condition: boolean, text: () => string): string[] => (condition ? [text()] : []);
 
 function dayOf(hour: number): string {
@@ -180,8 +183,8 @@ export const RULES: readonly Rule[] = [
     where: 'store',
     source: 'common practice, no source: 30 to 150 L per m²',
     judge: ({ design }) => {
-      const { areaM2 } = design.array;
-      if (areaM2 <= 0) return [];
+      const areaM2 = builtFields(design).reduce((sum, { array }) => sum + array.areaM2, 0);
+      if (areaM2 <= 0 || design.loop.layout === 'straight to the slab') return [];
       const ratio = design.store.volumeL / areaM2;
       return when(
         ratio < 30 || ratio > 150,
@@ -195,31 +198,31 @@ export const RULES: readonly Rule[] = [
     severity: 'note',
     where: 'array',
     source: 'common practice, no source: within 45° of the equator',
-    judge: ({ design, result }) => {
-      if (design.array.areaM2 <= 0) return [];
-      const south = result.year.southern ? 0 : 180;
-      const off = Math.abs(((design.array.azimuthDeg - south + 540) % 360) - 180);
-      return when(
-        off > 45,
-        () =>
-          `The array looks ${withUnit(formatFixed(off), '°')} away from the equator; its winter sun is weak.`,
-      );
-    },
+    judge: ({ design, result }) =>
+      builtFields(design).flatMap(({ array, name }) => {
+        const south = result.year.southern ? 0 : 180;
+        const off = Math.abs(((array.azimuthDeg - south + 540) % 360) - 180);
+        return when(
+          off > 45,
+          () =>
+            `The ${name} looks ${withUnit(formatFixed(off), '°')} away from the equator; its winter sun is weak.`,
+        );
+      }),
   },
   {
     id: 'H3',
     severity: 'stop',
     where: 'array',
     source: 'common practice, no source: lift to the top of the array + 1.2 m + friction',
-    judge: ({ design }) => {
-      const { pump } = design.loop;
-      const neededM = pumpDuty(design).fillHeadM + FILL_RESERVE_M;
-      return when(
-        design.array.areaM2 > 0 && pump.kind === 'curve' && pump.shutOffHeadM < neededM,
-        () =>
-          `The pump lifts ${withUnit(formatFixed(pump.shutOffHeadM, 1), 'm')} at most; filling the array asks for ${withUnit(formatFixed(neededM, 1), 'm')}. It will not start.`,
-      );
-    },
+    judge: ({ design: { loop, ...design } }) =>
+      builtFields(design).flatMap(({ array, name }) => {
+        const neededM = pumpDuty({ array, loop }).fillHeadM + FILL_RESERVE_M;
+        return when(
+          loop.pump.kind === 'curve' && loop.pump.shutOffHeadM < neededM,
+          () =>
+            `The pump lifts ${withUnit(formatFixed(loop.pump.shutOffHeadM, 1), 'm')} at most; filling the ${name} asks for ${withUnit(formatFixed(neededM, 1), 'm')}. It will not start.`,
+        );
+      }),
   },
   {
     id: 'H6',
@@ -228,9 +231,10 @@ export const RULES: readonly Rule[] = [
     source: 'common practice, no source: soft absorbers bear no vacuum',
     judge: ({ design }) =>
       when(
-        design.array.areaM2 > 0 &&
-          design.loop.pump.returnPipe === 'siphon' &&
-          design.collector.curve.waterContentLPerM2 >= SOFT_ABSORBER_L_PER_M2,
+        design.loop.pump.returnPipe === 'siphon' &&
+          builtFields(design).some(
+            ({ collector }) => collector.curve.waterContentLPerM2 >= SOFT_ABSORBER_L_PER_M2,
+          ),
         () =>
           'A siphon return pulls a vacuum at the top of the array; a soft absorber collapses under it. Vent the top and let the pump pay the lift.',
       ),
@@ -240,13 +244,14 @@ export const RULES: readonly Rule[] = [
     severity: 'caution',
     where: 'array',
     source: 'common practice, no source: 15 to 100 L/h per m²',
-    judge: ({ design }) => {
-      const perHour = design.array.flowKgPerSM2 * SECONDS_PER_HOUR;
-      return when(
-        design.array.areaM2 > 0 && (perHour < 15 || perHour > 100),
-        () => `The flow is ${withUnit(formatFixed(perHour), 'L/h')} per m²; 15 to 100 is usual.`,
-      );
-    },
+    judge: ({ design: { loop, ...design } }) =>
+      builtFields(design).flatMap(({ array, name }) => {
+        const perHour = (pumpDuty({ array, loop }).flowKgPerS / array.areaM2) * SECONDS_PER_HOUR;
+        return when(
+          perHour > 0 && (perHour < 15 || perHour > 100),
+          () => `The flow${of(name)} is ${withUnit(formatFixed(perHour), 'L/h')} per m²; 15 to 100 is usual.`,
+        );
+      }),
   },
   {
     id: 'H18',
@@ -270,7 +275,8 @@ export const RULES: readonly Rule[] = [
     source: 'common practice, no source: 20 starts a day',
     judge: ({ design, result }) => {
       const days = DAYS_IN_MONTH.reduce(
-        (sum, count, month) => sum + (design.array.mountedMonths[month] ? count : 0),
+        (sum, count, month) =>
+          sum + count * builtFields(design).filter(({ array }) => array.mountedMonths[month]).length,
         0,
       );
       const perDay = days > 0 ? result.year.starts / days : 0;
@@ -301,8 +307,9 @@ export const RULES: readonly Rule[] = [
     judge: ({ house, design }) =>
       when(
         house.hotWater.litresPerDay > 0 &&
-          house.hotWater.exchangerEffectiveness > 0 &&
-          design.array.areaM2 > 0,
+          (house.hotWater.exchanger === 'coil' || house.hotWater.exchangerEffectiveness > 0) &&
+          design.loop.layout !== 'straight to the slab' &&
+          builtFields(design).length > 0,
         () =>
           'Preheated drinking water lies between 20 and 45 °C, where legionella grow. Keep it in the exchanger only, heat it through after that, and follow local rules.',
       ),
@@ -324,16 +331,16 @@ export const RULES: readonly Rule[] = [
     severity: 'caution',
     where: 'array',
     source: 'geometry of infinitely long rows at solar noon of the shortest day, level horizon',
-    judge: ({ design, result }) => {
-      const { array } = design;
-      if (array.areaM2 <= 0 || array.rows <= 1) return [];
-      const { shaded, clearSpacingM } = shortestNoonShadow(array, array, result.year.latitudeDeg);
-      return when(
-        shaded >= 0.01,
-        () =>
-          `At noon of the shortest day each row shades ${formatShare(shaded)} of the next. ${withUnit(formatFixed(clearSpacingM, 1), 'm')} from front edge to front edge would clear it; now ${withUnit(formatFixed(array.rowSpacingM, 1), 'm')}.`,
-      );
-    },
+    judge: ({ design, result }) =>
+      builtFields(design).flatMap(({ array, name }) => {
+        if (array.rows <= 1) return [];
+        const { shaded, clearSpacingM } = shortestNoonShadow(array, array, result.year.latitudeDeg);
+        return when(
+          shaded >= 0.01,
+          () =>
+            `At noon of the shortest day each row${of(name)} shades ${formatShare(shaded)} of the next. ${withUnit(formatFixed(clearSpacingM, 1), 'm')} from front edge to front edge would clear it; now ${withUnit(formatFixed(array.rowSpacingM, 1), 'm')}.`,
+        );
+      }),
   },
   {
     id: 'A5',
@@ -342,7 +349,7 @@ export const RULES: readonly Rule[] = [
     source: 'common practice, no source',
     judge: ({ house, design }) =>
       when(
-        design.array.areaM2 > 0 && house.horizon.length === 0,
+        builtFields(design).length > 0 && house.horizon.length === 0,
         () =>
           'No horizon is entered: the sky is taken as open all round. A hill, house or trees to the south cost winter sun.',
       ),
@@ -354,7 +361,7 @@ export const RULES: readonly Rule[] = [
     source: 'EN 1991-1-4, EN 1991-1-3',
     judge: ({ design }) =>
       when(
-        design.array.areaM2 > 0,
+        builtFields(design).length > 0,
         () => 'Wind and snow loads, roof and ballast: local code and a licensed engineer decide.',
       ),
   },

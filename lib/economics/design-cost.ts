@@ -76,17 +76,20 @@ export function designCost(
   const { year } = result;
   const fields = [design, ...(design.second ? [design.second] : [])].filter(({ array }) => array.areaM2 > 0);
   const built = fields.length > 0;
-  const sum = (money: (field: (typeof fields)[number]) => number) =>
-    fields.reduce((total, field) => total + money(field), 0);
+  const pipesM = fields.reduce((total, { array }) => total + array.pipeLengthM, 0);
+  const ofField = (place: number) => (place > 0 ? ' of the second field' : '');
   const ownHoursAmount = built ? prices.ownHours * prices.hourlyRate : 0;
   const investment: MoneyLine[] = built
     ? [
-        { label: 'collectors', amount: sum(({ collector, array }) => collector.pricePerM2 * array.areaM2) },
+        ...fields.map(({ collector, array }, place) => ({
+          label: `collectors${ofField(place)}`,
+          amount: collector.pricePerM2 * array.areaM2,
+        })),
         { label: 'store', amount: prices.storeFixed + prices.storePerL * design.store.volumeL },
         { label: 'pump and control', amount: prices.pumpAndControl },
         {
           label: 'pipes',
-          amount: prices.pipeFixed + prices.pipePerM * 2 * sum(({ array }) => array.pipeLengthM),
+          amount: prices.pipeFixed + prices.pipePerM * 2 * pipesM,
         },
         { label: 'mixing and interface', amount: prices.interfaceFixed },
       ]
@@ -94,9 +97,9 @@ export function designCost(
   const toBuild = investment.reduce((sum, line) => sum + line.amount, 0);
   const priced: MoneyLine[] =
     ownHoursAmount > 0 ? [...investment, { label: 'own hours', amount: ownHoursAmount }] : investment;
-  const replacements: ReplacementLine[] = fields.flatMap(({ collector, array }) =>
+  const replacements: ReplacementLine[] = fields.flatMap(({ collector, array }, place) =>
     collector.replacements.map(({ label, pricePerM2, everyYears }) => ({
-      label,
+      label: label + ofField(place),
       amount: pricePerM2 * array.areaM2,
       everyYears,
     })),

@@ -1,3 +1,4 @@
+import { OF_SECOND_FIELD } from './built-fields';
 import { markCarriers } from './carriers';
 import { judgeDryHours, type DryColumns } from './dry-hours';
 import { ENGINE_VERSION } from './engine-version';
@@ -7,7 +8,7 @@ import type { Plan } from './plan';
 import type { EnergyBalance, EnergyRow, PartDryness, YearResult } from './results';
 import type { ReferenceNeed, SimulationInput } from './simulate';
 import { monthSum, type MonthField, type Tally } from './tally';
-import type { YearState } from './year';
+import type { YearState } from './year-state';
 import {
   DAYS_IN_MONTH,
   HOURS_PER_DAY,
@@ -94,7 +95,7 @@ function judgeFields(
   };
   const { mounted, planeWm2 } = plan.second.columns;
   const others = judgeDryHours(dry[1]!, mounted, planeWm2, second.collector, aside, first.length);
-  return [...first, ...others.map((part) => ({ ...part, name: `${part.name}, second field` }))];
+  return [...first, ...others.map((part) => ({ ...part, name: part.name + OF_SECOND_FIELD }))];
 }
 
 function monthRow(tally: Tally, month: number): EnergyRow {

@@ -21,7 +21,7 @@ const film: ComparedDesign = {
   id: 'film',
   name: 'Film rows',
   areaM2: 24,
-  cover: 'film',
+  fields: [{ areaM2: 24, cover: 'film' }],
   volumeL: 2000,
   weatherName: 'Upland',
   synthetic: true,
@@ -68,7 +68,7 @@ const factory: ComparedDesign = {
   ...film,
   id: 'factory',
   name: 'Factory ten',
-  cover: 'selective glass',
+  fields: [{ areaM2: 10, cover: 'selective glass' }],
   areaM2: 10,
   volumeL: 1000,
   solarKwh: 3700,
@@ -206,8 +206,8 @@ describe('the demonstration, compared', () => {
   });
 
   it('shows a homemade film design that bears its dry days beside a selective-coated one', () => {
-    const filmRows = compared.find(({ cover }) => cover === 'film')!;
-    const selective = compared.find(({ cover }) => cover === 'selective glass')!;
+    const filmRows = compared.find(({ fields }) => fields[0]?.cover === 'film')!;
+    const selective = compared.find(({ fields }) => fields[0]?.cover === 'selective glass')!;
     expect(readStones(filmRows.stones)).toHaveLength(8760);
     expect(filmRows.hotHours).toBe(0);
     expect(selective.solarShare).toBeGreaterThan(0);

@@ -10,8 +10,10 @@ import { sameDesign } from '@/components/study/same-design';
 import { flatStretch } from '@/components/study/use-traces';
 import { verdictParts, verdictText } from '@/components/study/verdict-words';
 import { nextValue, placeOf, valueAt } from '@/components/ui/slider';
+import { collectorByCover } from '@/data/collectors/generic';
 import { demonstration } from '@/data/demonstration/larkspur-house';
 import { CARRIERS } from '@/lib/simulation/results';
+import { withUnit } from '@/lib/units/display';
 import { inventedAnswer } from '../fakes/invented-answer';
 
 const { house, prices, designs } = demonstration;
@@ -42,6 +44,31 @@ describe('the verdict', () => {
     expect(plain(verdictText(verdictParts(answer, house, prices)))).toBe(
       'Without sun on the array nothing is carried: the boiler burns 3 990 kg of pellets a year.',
     );
+  });
+
+  it('names both fields where a design has two', () => {
+    const second = { collector: collectorByCover['selective glass'], array: { ...saved.array, areaM2: 6 } };
+    const answer = inventedAnswer(
+      { ...saved, second },
+      { solarKwh: 3700, backupKwh: 12400, referenceKwh: 16100, perKwh: 0.1 },
+    );
+    expect(plain(verdictText(verdictParts(answer, house, prices)))).toMatch(
+      /^With 24 m² of film-covered absorbers and 6 m² of factory collectors the sun carries 23 %/,
+    );
+    expect(explain('secondArea', answer, house, prices)).toMatchObject({
+      title: 'Area of the second field',
+      value: withUnit('6', 'm²'),
+    });
+    const labels = answer.cost.investment.map(({ label }) => label);
+    expect(labels).toEqual(expect.arrayContaining(['collectors', 'collectors of the second field']));
+    const only = inventedAnswer(
+      { ...saved, array: { ...saved.array, areaM2: 0 }, second },
+      { solarKwh: 3700, backupKwh: 12400, referenceKwh: 16100, perKwh: 0.1 },
+    );
+    expect(plain(verdictText(verdictParts(only, house, prices)))).toMatch(
+      /^With 6 m² of factory collectors the/,
+    );
+    expect(only.cost.investment.map(({ label }) => label)).not.toContain('collectors of the second field');
   });
 
   it('reads gas in kilowatt hours', () => {

@@ -43,6 +43,12 @@ function Figures({ run }: { run: RunSummary | null }) {
   );
 }
 
+function builtWords({ array, collector, second }: DesignRecord): string {
+  const words = (field: Pick<DesignRecord, 'array' | 'collector'>) =>
+    `${withUnit(formatTyped(field.array.areaM2), 'm²')}, ${field.collector.name}`;
+  return second ? `${words({ array, collector })} and ${words(second)}` : words({ array, collector });
+}
+
 /** The designs of a project with the figures of their last year on the server. */
 export function DesignList({ projectId, designs }: DesignListProps) {
   if (designs.length === 0) return <p>There is none yet.</p>;
@@ -60,8 +66,7 @@ export function DesignList({ projectId, designs }: DesignListProps) {
                 {name}
               </Link>
               <p className="text-note text-muted">
-                {withUnit(formatTyped(data.array.areaM2), 'm²')}, {data.collector.name},{' '}
-                {withUnit(formatTyped(data.store.volumeL), 'L')}
+                {builtWords(data)}, {withUnit(formatTyped(data.store.volumeL), 'L')}
               </p>
             </div>
             <Figures run={lastRun} />
