@@ -4,10 +4,13 @@ import Link from 'next/link';
 import { useState } from 'react';
 import { useSaving } from '@/components/forms/use-saving';
 import type { SaveAnswer, SaveState, Stored } from '@/components/forms/use-saving';
+import type { Answer } from '@/lib/schemas/answer';
 import type { DesignRecord } from '@/lib/schemas/design';
 import type { RunSummary } from '@/lib/schemas/run-summary';
 import { formatShare } from '@/lib/units/display';
 import { readAddress } from './address';
+import { OlderRun } from './older-run';
+import type { RepeatedYear } from './older-run';
 import { Study } from './study';
 import type { StudyProps } from './study';
 import { TimeAgo } from './time-ago';
@@ -20,6 +23,8 @@ interface ProjectStudyProps extends Pick<StudyProps, 'house' | 'prices' | 'weath
   /** search parameters of the address */
   params: readonly (readonly [string, string])[];
   save(data: DesignRecord, version: number): Promise<SaveAnswer<DesignRecord>>;
+  /** has the stored design worked again by the present engine */
+  repeat(): Promise<Answer<RepeatedYear>>;
 }
 
 /** The study of a project's design: every lever, and a button that keeps what they stand at. */
@@ -57,6 +62,9 @@ export function ProjectStudy(props: ProjectStudyProps) {
           <p className="text-note text-muted" aria-live="polite">
             <Standing pending={pending} changed={changed} lastRun={lastRun} />
           </p>
+          {lastRun && !lastRun.currentEngine && !changed && (
+            <OlderRun engineVersion={lastRun.engineVersion} repeat={props.repeat} />
+          )}
           <SaveTrouble
             state={state}
             onTakeTheirs={(theirs) => {

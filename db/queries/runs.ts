@@ -53,6 +53,17 @@ export function findRun(db: Kysely<Database>, designId: string, inputsHash: stri
     .where('engine_version', '=', engineVersion);
 }
 
+/** The newest run of a design, in figures only; undefined before the first. */
+export function findLastRun(db: Kysely<Database>, designId: string) {
+  return db
+    .selectFrom('run')
+    .select(['inputs_hash', 'engine_version', 'summary', 'created_at'])
+    .where('design_id', '=', designId)
+    .orderBy('created_at', 'desc')
+    .limit(1)
+    .executeTakeFirst();
+}
+
 /** The newest run of each design of a project, in figures only. */
 export function listLastRuns(db: Kysely<Database>, projectId: string) {
   return db

@@ -30,6 +30,7 @@ export function summaryOfRun(run: SummaryRow, currentHash: string | undefined): 
     inputsHash: run.inputs_hash,
     createdAt: run.created_at.toISOString(),
     current: run.inputs_hash === currentHash && run.engine_version === ENGINE_VERSION,
+    currentEngine: run.engine_version === ENGINE_VERSION,
     year: run.summary.year,
     dryParts: run.summary.dryParts,
   };

@@ -39,6 +39,7 @@ const OF_A_THING: Record<string, Call> = {
   createDesign: ({ projectId }) => designs.createDesign(projectId, design),
   saveDesign: ({ designId }) => designs.saveDesign(designId, design, 1),
   readRun: ({ designId }) => runs.readRun(designId),
+  repeatRun: ({ designId }) => runs.repeatRun(designId),
   listWeatherYears: ({ projectId }) => weatherYears.listWeatherYears(projectId),
   storeWeatherYear: ({ projectId }) =>
     weatherYears.storeWeatherYear(projectId, 'hill.epw', EPW_BYTES, { repair: false }),

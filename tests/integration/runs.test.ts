@@ -1,3 +1,4 @@
+import { sql } from 'kysely';
 import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
 import { toBytes } from '@/db/pack-floats';
 import { insertRun } from '@/db/queries/runs';
@@ -7,7 +8,7 @@ import { ENGINE_VERSION } from '@/lib/simulation/engine-version';
 import { saveDesign } from '@/lib/server/designs';
 import { createProjectFromDemonstration, readProject, saveHouse } from '@/lib/server/projects';
 import { runPool } from '@/lib/server/run-pool';
-import { readRun } from '@/lib/server/runs';
+import { readRun, repeatRun } from '@/lib/server/runs';
 import { storeWeatherYear } from '@/lib/server/weather-years';
 import { readWeather } from '@/lib/weather/read-weather';
 import { hasPostgres } from './fresh-database';
@@ -82,6 +83,34 @@ describe.skipIf(!hasPostgres)('runs', { timeout: 30_000 }, () => {
     expect((await read()).designs[0]!.lastRun).toMatchObject({ current: false });
     expect(await readRun(id)).toMatchObject({ ok: true, summary: { current: true } });
     expect(await count()).toBe(2);
+  });
+
+  it('keeps a year of an older engine readable, and works it again beside it', async () => {
+    const { id } = (await read()).designs[0]!;
+    await readRun(id);
+    await world.db.updateTable('run').set({ engine_version: '0.0.9' }).where('design_id', '=', id).execute();
+    // an older engine did not store every field
+    await world.db
+      .updateTable('run')
+      .set({ summary: sql`summary #- '{year,roomMinC}'` })
+      .execute();
+    expect((await read()).designs[0]!.lastRun).toMatchObject({
+      engineVersion: '0.0.9',
+      currentEngine: false,
+      current: false,
+    });
+    const repeated = await repeatRun(id);
+    if (!repeated.ok) throw new Error(repeated.message);
+    expect(repeated).toMatchObject({
+      before: { engineVersion: '0.0.9' },
+      after: { engineVersion: ENGINE_VERSION, current: true },
+      sameInputs: true,
+    });
+    const figure = (label: string) => repeated.differences.find((line) => line.label === label);
+    expect(figure('coldest room')).toMatchObject({ before: null });
+    const bought = figure('bought energy')!;
+    expect(bought.before).toBe(bought.after);
+    expect((await read()).designs[0]!.lastRun).toMatchObject({ currentEngine: true });
   });
 
   it('keeps no more than five runs of a design, the newest', async () => {

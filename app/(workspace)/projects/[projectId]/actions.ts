@@ -4,6 +4,7 @@ import { revalidatePath } from 'next/cache';
 import { redirect } from 'next/navigation';
 import { createDesign, deleteDesign, saveDesign } from '@/lib/server/designs';
 import { readProject, saveHouse, savePrices } from '@/lib/server/projects';
+import { repeatRun } from '@/lib/server/runs';
 
 /** Stores the house of a project. */
 export async function saveHouseAction(projectId: string, data: unknown, version: number) {
@@ -22,6 +23,13 @@ export async function savePricesAction(projectId: string, data: unknown, version
 /** Stores a design and has its year worked on the server. */
 export async function saveDesignAction(projectId: string, designId: string, data: unknown, version: number) {
   const answer = await saveDesign(designId, data, version);
+  if (answer.ok) revalidatePath(`/projects/${projectId}`, 'layout');
+  return answer;
+}
+
+/** Has a stored design worked again by the present engine, beside its older year. */
+export async function repeatRunAction(projectId: string, designId: string) {
+  const answer = await repeatRun(designId);
   if (answer.ok) revalidatePath(`/projects/${projectId}`, 'layout');
   return answer;
 }

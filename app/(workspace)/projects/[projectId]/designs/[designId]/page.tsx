@@ -4,7 +4,7 @@ import { notFound } from 'next/navigation';
 import { ProjectStudy } from '@/components/study/project-study';
 import { Refused } from '../../../../_components/refused';
 import { projectOf } from '../../_components/project-of';
-import { saveDesignAction } from '../../actions';
+import { repeatRunAction, saveDesignAction } from '../../actions';
 
 export const metadata: Metadata = { title: 'Study' };
 
@@ -43,6 +43,7 @@ export default async function StudyPage({ params, searchParams }: StudyPageProps
         typeof value === 'string' ? [[key, value] as const] : [],
       )}
       save={saveDesignAction.bind(null, projectId, designId)}
+      repeat={repeatRunAction.bind(null, projectId, designId)}
     />
   );
 }
