@@ -1,7 +1,5 @@
 import type { Metadata, Viewport } from 'next';
 import type { ReactNode } from 'react';
-import { SiteFoot } from '@/components/site-foot';
-import { SiteHead } from '@/components/site-head';
 import { fontVariables } from './fonts';
 import './globals.css';
 
@@ -20,7 +18,7 @@ export const viewport: Viewport = {
   ],
 };
 
-/** The frame of every page: skip link, running head, and the one `main` that pages fill. */
+/** What every page has: skip link and margins. Head, `main` and foot come with the frame of each group of pages. */
 export default function RootLayout({ children }: Readonly<{ children: ReactNode }>) {
   return (
     <html lang="en-GB" className={fontVariables}>
@@ -31,13 +29,7 @@ export default function RootLayout({ children }: Readonly<{ children: ReactNode 
         >
           Skip to the content
         </a>
-        <div className="mx-auto max-w-[90rem] page-margin">
-          <SiteHead />
-          <main id="main" tabIndex={-1} className="pb-10">
-            {children}
-          </main>
-          <SiteFoot />
-        </div>
+        <div className="mx-auto max-w-[90rem] page-margin">{children}</div>
       </body>
     </html>
   );

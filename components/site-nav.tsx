@@ -1,23 +1,23 @@
 'use client';
 
-import Link from 'next/link';
 import { usePathname } from 'next/navigation';
+import { HeadLinks } from './head-links';
 
-/** Pages that need an account have a strip of their own; the sign-in needs no link to itself. */
-const WITHOUT = ['/projects', '/sign-in'];
+const PAGES = [
+  { href: '/demonstration', word: 'Demonstration' },
+  { href: '/demonstration/compare', word: 'Compare' },
+  { href: '/method', word: 'How it computes' },
+  { href: '/validation', word: 'Validation' },
+  { href: '/sign-in', word: 'Sign in' },
+] as const;
 
-/** The way in, on the public pages. */
+/** The pages that need no account, and the way in. */
 export function SiteNav() {
   const pathname = usePathname();
-  if (WITHOUT.some((start) => pathname.startsWith(start))) return null;
+  const isHere = (href: string) => (href === '/method' ? pathname.startsWith(href) : pathname === href);
   return (
-    <nav aria-label="Main" className="ml-auto flex flex-wrap gap-x-6">
-      <Link href="/method" className="inline-flex min-h-9 items-center">
-        How it computes
-      </Link>
-      <Link href="/sign-in" className="inline-flex min-h-9 items-center">
-        Sign in
-      </Link>
+    <nav aria-label="Main" className="max-sm:w-full sm:ml-auto">
+      <HeadLinks links={PAGES.map((page) => ({ ...page, current: isHere(page.href) }))} />
     </nav>
   );
 }

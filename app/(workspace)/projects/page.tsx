@@ -1,6 +1,8 @@
 import type { Metadata } from 'next';
 import Link from 'next/link';
+import { PageFrame } from '@/components/page-frame';
 import { listProjects, type ProjectSummary } from '@/lib/server/projects';
+import { AccountNav } from '../_components/account-nav';
 import { Refused } from '../_components/refused';
 import { CreateProjectForm } from './_components/create-project-form';
 import { DeleteProject } from './_components/delete-project';
@@ -12,14 +14,16 @@ export default async function ProjectsPage() {
   if (!answer.ok) return <Refused refusal={answer} from="/projects" />;
   const { projects } = answer;
   return (
-    <div className="pt-7">
-      <h1 className="mb-6">Projects</h1>
-      {projects.length > 0 ? <ProjectTable projects={projects} /> : <NoProjectYet />}
-      <section className="mt-10 max-w-[44rem] pt-4 rule-ink">
-        <h2 className="mb-3">{projects.length > 0 ? 'Another house' : 'Your first house'}</h2>
-        <CreateProjectForm defaultName="My house" first={projects.length === 0} />
-      </section>
-    </div>
+    <PageFrame nav={<AccountNav />}>
+      <div className="pt-7">
+        <h1 className="mb-6">Projects</h1>
+        {projects.length > 0 ? <ProjectTable projects={projects} /> : <NoProjectYet />}
+        <section className="mt-10 max-w-[44rem] pt-4 rule-ink">
+          <h2 className="mb-3">{projects.length > 0 ? 'Another house' : 'Your first house'}</h2>
+          <CreateProjectForm defaultName="My house" first={projects.length === 0} />
+        </section>
+      </div>
+    </PageFrame>
   );
 }
 
