@@ -30,7 +30,7 @@ export interface HourColumns {
   unmetW: Float32Array;
   storeTopC: Float32Array;
   storeBottomC: Float32Array;
-  /** layer-major: layer i of hour h at [i * 8760 + h]; layer 0 = top */
+  /** hour by hour: layer i of hour h at [h * layers + i]; layer 0 = top */
   storeLayersC: Float32Array;
   roomC: Float32Array;
   /** mean surface temperature of the heated floor (room temperature without one) */

@@ -8,7 +8,8 @@ import type { DryColumns } from './dry-hours';
 import type { Plan } from './plan';
 import type { YearResult } from './results';
 import { Tally } from './tally';
-import { runYear, YearState, type YearStatus } from './year';
+import { runYear, type YearStatus } from './year';
+import { YearState } from './year-state';
 
 export interface SimulationInput {
   weather: WeatherYear;

@@ -2,7 +2,7 @@ import { HOURS_PER_YEAR, KWH_PER_J, MONTH_START_HOUR, SECONDS_PER_HOUR } from '@
 import type { ArrayLoop } from './array-loop';
 import type { Plan } from './plan';
 import type { HourColumns } from './results';
-import type { YearState } from './year';
+import type { YearState } from './year-state';
 
 /** Sums per month [J], in the order of one row of `monthJ`. */
 export const MONTH_FIELDS = [
@@ -46,6 +46,8 @@ export const HOUR = {
   WINDOW_RELOSS: 10,
   SUPPLY: 11,
   RETURN: 12,
+  /** sum of the duties, by which supply and return are weighted [-] */
+  DUTY: 13,
 } as const;
 
 /** Allocates the hourly columns of a year. */
@@ -114,7 +116,7 @@ export class Tally {
   private pumpJ = 0;
   private unusedJ = 0;
   /** mean powers [W] and loop temperatures [°C] of the hour that is being worked, by `HOUR` */
-  readonly hour = new Float64Array(13);
+  readonly hour = new Float64Array(14);
 
   constructor(layers: number) {
     this.columns = createColumns(layers);
@@ -208,11 +210,12 @@ export class Tally {
     c.storeTopC[h] = state.store.topC;
     c.storeBottomC[h] = state.store.bottomC;
     const layers = state.store.count;
-    for (let i = 0; i < layers; i++) c.storeLayersC[i * HOURS_PER_YEAR + h] = state.store.t[i]!;
+    for (let i = 0; i < layers; i++) c.storeLayersC[h * layers + i] = state.store.t[i]!;
     c.roomC[h] = state.network.airC;
     c.floorSurfaceC[h] = plan.floorWPerK > 0 ? state.network.slabC : state.network.airC;
-    c.supplyC[h] = hour[HOUR.SUPPLY]!;
-    c.returnC[h] = hour[HOUR.RETURN]!;
+    const duty = hour[HOUR.DUTY]!;
+    c.supplyC[h] = duty > 0 ? hour[HOUR.SUPPLY]! / duty : NaN;
+    c.returnC[h] = duty > 0 ? hour[HOUR.RETURN]! / duty : NaN;
 
     const m = this.monthJ;
     const row = MONTH_OF_HOUR[h]! * WIDTH;

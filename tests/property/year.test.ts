@@ -41,7 +41,7 @@ function expectLayersInRange(columns: HourColumns, layers: number, low: number, 
   for (let h = 0; h < HOURS_PER_YEAR; h++) {
     let above = high + FLOAT_K;
     for (let i = 0; i < layers; i++) {
-      const layerC = storeLayersC[i * HOURS_PER_YEAR + h]!;
+      const layerC = storeLayersC[h * layers + i]!;
       if (layerC > above) expect(layerC, `layer ${i} of hour ${h} and what may lie above it`).toBe(above);
       above = layerC;
     }

@@ -1,7 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { demonstration } from '@/data/demonstration/larkspur-house';
 import { PlanBuilder } from '@/lib/simulation/build-plan';
-import { runYear, YearState } from '@/lib/simulation/year';
+import { runYear } from '@/lib/simulation/year';
+import { YearState } from '@/lib/simulation/year-state';
 import { monthSum, Tally } from '@/lib/simulation/tally';
 import { HOURS_PER_YEAR, J_PER_KWH } from '@/lib/units/constants';
 import type { CapacityClass } from '@/lib/physics/house-network';

@@ -1,6 +1,7 @@
 import { Tally, monthSum } from '@/lib/simulation/tally';
 import type { Plan } from '@/lib/simulation/plan';
-import { runYear, YearState } from '@/lib/simulation/year';
+import { runYear } from '@/lib/simulation/year';
+import { YearState } from '@/lib/simulation/year-state';
 import { HOURS_PER_DAY, J_PER_KWH, SECONDS_PER_HOUR } from '@/lib/units/constants';
 import type { Flow } from './equations';
 import type { WeekStart, WeekSums } from './integrate-week';
