@@ -17,12 +17,7 @@ export function BalanceTable({ balances }: { balances: readonly BalanceOfDesign[
   const [first] = balances;
   if (!first) return null;
   return (
-    <div
-      className="overflow-x-auto"
-      role="region"
-      aria-label="Energy balance of the demonstration"
-      tabIndex={0}
-    >
+    <div className="overflow-x-auto" role="region" aria-label="Terms of the balance, by design" tabIndex={0}>
       <table className="w-full max-w-[60rem] min-w-[36rem]">
         <thead>
           <tr>
