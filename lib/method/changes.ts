@@ -6,11 +6,31 @@ export interface EngineChange {
   moves: readonly { what: string; byHowMuch: string }[];
 }
 
-/**
- * Results that change, the newest version first. The middle number rises when results move by choice or by a new
- * effect, the last when a fault is mended, the first when old results can no longer be compared.
- */
+/** Results that change, the newest version first; the numbers are those of the demonstration's designs. */
 export const CHANGES: readonly EngineChange[] = [
+  {
+    version: '0.2.0',
+    date: '2026-12-01',
+    moves: [
+      {
+        what: 'Heat that a floor loses downwards counts in the flow of its loop, and emitters cool their water no further than to the room.',
+        byHowMuch: 'Solar heat −0.7 to −1.2 %, bought energy +0.8 to +1.1 %, the need without sun +0.4 %.',
+      },
+      {
+        what: 'A pre-period sets the initial state; the year is repeated only when heat is left over.',
+        byHowMuch: 'Solar heat −0.03 %, bought energy +0.05 %.',
+      },
+      {
+        what: 'A sub-step ends when the heating draw has brought the top of the store down to its return.',
+        byHowMuch:
+          'Nothing on the demonstration; small stores with large draws by less than the step’s own error.',
+      },
+      {
+        what: 'New effects: layouts with a vessel or straight to the slab, coil, pump curve, skyline, rows, two-axis modifiers, a second field, night setback, heat pump.',
+        byHowMuch: 'Nothing while they are not asked for.',
+      },
+    ],
+  },
   {
     version: '0.1.0',
     date: '2026-12-01',

@@ -56,7 +56,7 @@ export const CHOICES: readonly Choice[] = [
     subject: 'Pump, stop',
     text: `Stops when outlet − inlet falls below ${defaultWords(stopK)} after at least ${defaultWords(minimumRunS)}, or when the top of the store passes its limit of ${defaultWords(storeLimitC)} (unlocked {STORE_UNLOCK_K} K lower), or when the array is taken down; limit and taking down override the minimum run.`,
     effect: 'the stop pair: up to −5.7 %',
-    fixedIn: ['lib/simulation/year.ts', 'lib/simulation/build-plan.ts'],
+    fixedIn: ['lib/simulation/charge-step.ts', 'lib/simulation/build-plan.ts'],
   },
   {
     subject: 'Drained state',
@@ -76,25 +76,25 @@ export const CHOICES: readonly Choice[] = [
   },
   {
     subject: 'Hot water',
-    text: 'A plate exchanger of constant effectiveness in balanced counter-flow, store water from the top back to the bottom; the tap side is mixed down to the set point.',
+    text: 'A plate exchanger of constant effectiveness in balanced counter-flow, store water from the top back to the bottom; the tap side is mixed down to the set point. A coil in the store can be chosen instead.',
     effect: 'a coil instead: −1.3 %',
-    fixedIn: ['lib/simulation/year.ts'],
+    fixedIn: ['lib/simulation/charge-step.ts'],
   },
   {
     subject: 'Order of heat',
     text: 'Top of the store at or above the set supply: mixing valve. Set supply above the top, and the top more than {RETURN_MARGIN_K} K above the return: the whole loop flow runs through the store and the backup lifts it to the set supply. Otherwise the backup alone, up to its rated power. What it cannot give is reported as unmet.',
     effect: 'without preheating the return: up to −10 %',
-    fixedIn: ['lib/simulation/year.ts'],
+    fixedIn: ['lib/simulation/emitter-duty.ts'],
   },
   {
     subject: 'Thermostat',
     text: 'Senses the air; proportional over ± {HALF_BAND_K} K; acts as duty at full loop flow and set supply. No heating while outdoor air is at or above the set point.',
     effect: 'as modulation of the flow: +2 to +7 %',
-    fixedIn: ['lib/simulation/year.ts'],
+    fixedIn: ['lib/simulation/emitter-duty.ts'],
   },
   {
     subject: 'Outdoor reset',
-    text: 'From the outdoor temperature of the hour, limited by the emitter’s limiter.',
+    text: 'From the outdoor temperature of the hour and the day’s set point, also at night, limited by the emitter’s limiter.',
     fixedIn: ['lib/physics/outdoor-reset.ts'],
   },
   {
@@ -111,7 +111,7 @@ export const CHOICES: readonly Choice[] = [
   {
     subject: 'Heat of a radiator',
     text: 'A share of {RADIATOR_TO_AIR} goes to the air, the rest to the surface node.',
-    fixedIn: ['lib/simulation/year.ts'],
+    fixedIn: ['lib/simulation/emitter-duty.ts'],
   },
   {
     subject: 'Store',
@@ -121,11 +121,11 @@ export const CHOICES: readonly Choice[] = [
   {
     subject: 'House',
     text: 'Gains are split as in ISO 13790, with the re-loss through windows. Set point on the air. Windows are opened above {OPENING_C} °C and then let {OPENING_FACTOR} times the air through, unless that is switched off.',
-    fixedIn: ['lib/simulation/year.ts'],
+    fixedIn: ['lib/simulation/hour-drive.ts'],
   },
   {
     subject: 'Year',
-    text: 'One year is run first to set the starting state; the change of stored heat over the counted year is reported with the balance.',
+    text: 'The last two months of the year are run first to set the starting state. Where the heat stored at the end of the year then differs from that at its start by more than {STORED_TOLERANCE} of what went in, the year is run again, {MOST_YEARS} times at most; the change that is left is reported with the balance.',
     fixedIn: ['lib/simulation/simulate.ts'],
   },
   {
