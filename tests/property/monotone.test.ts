@@ -33,7 +33,8 @@ function solarKwh(drawn: AnyDesign): number | undefined {
 describe('area of any array', () => {
   /*
    * Tolerance: the store keeps its size, so a larger array turns it over faster and mixes its layers more, and starts
-   * come at other moments. Both may cost a little heat beside the gain of the area.
+   * come at other moments. Both may cost a little heat beside the gain of the area. The slope may rise by a tenth
+   * where the store has to pass a warm mains before it is of use.
    */
   it('more area gives more solar heat, with falling slope', () => {
     forDesigns(RUNS / 10, anyDesign, (drawn) => {
@@ -46,7 +47,7 @@ describe('area of any array', () => {
       const judgesSlope = first > WORTH_KWH_PER_M2 * AREAS_M2[0]!;
       for (const heat of rest) {
         expect(heat - before, heats.join(', ')).toBeGreaterThan(-tolerance);
-        if (judgesSlope) expect(heat - before, heats.join(', ')).toBeLessThan(slope + 2 * tolerance);
+        if (judgesSlope) expect(heat - before, heats.join(', ')).toBeLessThan(1.1 * slope + 2 * tolerance);
         slope = heat - before;
         before = heat;
       }
