@@ -9,8 +9,14 @@ export interface HeadLink {
   current: boolean;
 }
 
+interface HeadLinksProps {
+  links: readonly HeadLink[];
+  /** on a phone: break the line instead of letting it scroll */
+  wrap?: boolean;
+}
+
 /** Links of the running head: side by side, and on a phone one line that scrolls in itself to the page one is on. */
-export function HeadLinks({ links }: { links: readonly HeadLink[] }) {
+export function HeadLinks({ links, wrap = false }: HeadLinksProps) {
   const list = useRef<HTMLUListElement>(null);
   const here = links.find(({ current }) => current)?.href;
 
@@ -21,7 +27,10 @@ export function HeadLinks({ links }: { links: readonly HeadLink[] }) {
   }, [here]);
 
   return (
-    <ul ref={list} className="relative -m-1 flex gap-x-5 p-1 max-sm:overflow-x-auto sm:flex-wrap">
+    <ul
+      ref={list}
+      className={`relative -m-1 flex gap-x-5 p-1 ${wrap ? 'flex-wrap' : 'max-sm:overflow-x-auto sm:flex-wrap'}`}
+    >
       {links.map(({ href, word, current }) => (
         <li key={href}>
           <Link

@@ -17,7 +17,7 @@ export function SiteNav() {
   const isHere = (href: string) => (href === '/method' ? pathname.startsWith(href) : pathname === href);
   return (
     <nav aria-label="Main" className="max-sm:w-full sm:ml-auto">
-      <HeadLinks links={PAGES.map((page) => ({ ...page, current: isHere(page.href) }))} />
+      <HeadLinks wrap links={PAGES.map((page) => ({ ...page, current: isHere(page.href) }))} />
     </nav>
   );
 }

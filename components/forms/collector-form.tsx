@@ -69,7 +69,7 @@ export function CollectorForm({ designId, stored, currency, save, frieze }: Coll
       <SecondField
         firstArray={stored.data.array}
         firstField="second.collector.name"
-        elsewhere="Save it here; its area, tilt, months and pipes then stand under Loop and store."
+        elsewhere="Once it is saved, its area, tilt, months and pipes stand under Loop and store."
       >
         <SecondCollector />
       </SecondField>

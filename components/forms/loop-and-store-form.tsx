@@ -168,7 +168,7 @@ export function LoopAndStoreForm({ designId, stored, currency, save, frieze }: L
       <SecondField
         firstArray={stored.data.array}
         firstField="second.array.areaM2"
-        elsewhere="Save it here; its collectors then stand under Collector."
+        elsewhere="Once it is saved, its collectors stand under Collector."
       >
         <ArrayFields path="second.array" />
         <FieldRow>

@@ -104,3 +104,34 @@ test('a generic class is laid into the collector, and the server works its year'
   await page.goto(project);
   await expect(inner(page).getByText('Selective-coated flat plate').first()).toBeVisible();
 });
+
+test('a second field is added, saved and still there after a reload, on both of its pages', async ({
+  page,
+}) => {
+  const project = await openHouse(page, 'Two Field Cottage');
+  await page.goto(project);
+  await inner(page).getByRole('link', { name: 'Loop and store of Film rows, winter' }).click();
+  const second = page.getByRole('region', { name: 'Second field' });
+  await second.getByLabel('Its collectors, to begin with').selectOption('Selective-coated flat plate');
+  await second.getByRole('button', { name: 'Add a second field' }).click();
+  await expect(second.getByRole('textbox', { name: 'Array area' })).toBeFocused();
+  await second.getByRole('textbox', { name: 'Array area' }).fill('6');
+  await second.getByRole('textbox', { name: 'Tilt' }).fill('50');
+  await page.getByRole('button', { name: 'Save' }).click();
+  await expect(page.getByText(/^saved at/)).toBeVisible();
+  await page.reload();
+  await expect(second.getByRole('textbox', { name: 'Array area' })).toHaveValue('6');
+  await expect(second.getByRole('textbox', { name: 'Tilt' })).toHaveValue('50');
+  await expectGoodPage(page);
+
+  const around = page.getByRole('navigation', { name: 'Project' });
+  await around.getByRole('link', { name: 'Collector' }).click();
+  await expect(second.getByRole('textbox', { name: 'Declared stagnation temperature' })).toHaveValue('189');
+  await expectGoodPage(page);
+  await around.getByRole('link', { name: 'Study' }).click();
+  await expect(page.getByRole('heading', { level: 1 })).toContainText(
+    /film-covered absorbers and 6\sm² of factory collectors/,
+    { timeout: 30_000 },
+  );
+  await expect(page.getByText('Area, cover, tilt and months move the first field.')).toBeVisible();
+});
