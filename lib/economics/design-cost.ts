@@ -30,7 +30,7 @@ export interface PricedDesign {
     replacements: readonly { label: string; pricePerM2: number; everyYears: number }[];
   };
   array: { areaM2: number; pipeLengthM: number };
-  /** a second field on the same store; its pipes are counted, pump and control are not bought twice */
+  /** a second field on the same store, with pipes, pump and control of its own */
   second?: Pick<PricedDesign, 'collector' | 'array'> | null;
   store: { volumeL: number };
 }
@@ -86,7 +86,7 @@ export function designCost(
           amount: collector.pricePerM2 * array.areaM2,
         })),
         { label: 'store', amount: prices.storeFixed + prices.storePerL * design.store.volumeL },
-        { label: 'pump and control', amount: prices.pumpAndControl },
+        { label: 'pump and control', amount: prices.pumpAndControl * fields.length },
         {
           label: 'pipes',
           amount: prices.pipeFixed + prices.pipePerM * 2 * pipesM,
