@@ -56,6 +56,17 @@ describe.each(places)('the sun at %s', (_, latitudeDeg, longitudeDeg, timeZoneH)
     expect(worst).toBeLessThan(0.02);
   });
 
+  it.each([1995, 2010, 2040])('stands within 0.02° of the ephemeris in %i too', (year) => {
+    const startMs = Date.UTC(year, 0, 1);
+    let worst = 0;
+    for (let hour = 0; hour < 8760; hour += 211) {
+      const timeMs = startMs + hour * HOUR_MS;
+      const found = sunPosition(timeMs, latitudeDeg, longitudeDeg);
+      worst = Math.max(worst, separationDeg(found, ephemeris(timeMs, latitudeDeg, longitudeDeg)));
+    }
+    expect(worst).toBeLessThan(0.02);
+  });
+
   it('stands there in the hours of the year too, at the middle of each wholly lit hour', () => {
     const sun = sunYear({ latitudeDeg, longitudeDeg, timeZoneH }, -0.5);
     let worst = 0;
