@@ -106,11 +106,19 @@ function words(run: Run): string {
   }
 }
 
+/** Ends a worker; one that is ended while it loads would still report that as its failure. */
+function dismiss(worker: Worker | undefined): void {
+  if (!worker) return;
+  worker.onmessage = null;
+  worker.onerror = null;
+  worker.terminate();
+}
+
 function useValidation(built: Validation) {
   const [shown, setShown] = useState(built);
   const [run, setRun] = useState<Run>({ kind: 'built' });
   const worker = useRef<Worker>(undefined);
-  useEffect(() => () => worker.current?.terminate(), []);
+  useEffect(() => () => dismiss(worker.current), []);
 
   function start() {
     const began = performance.now();
@@ -128,18 +136,18 @@ function useValidation(built: Validation) {
         balances: [...before.balances, ...came.balances],
       }));
       if (done < total) return setRun({ kind: 'running', done, total });
-      started.terminate();
+      dismiss(started);
       setRun({ kind: 'done', seconds: (performance.now() - began) / 1000 });
     };
     started.onerror = () => {
-      started.terminate();
+      dismiss(started);
       setShown(built);
       setRun({ kind: 'failed' });
     };
   }
 
   function cancel() {
-    worker.current?.terminate();
+    dismiss(worker.current);
     setRun((now) => (now.kind === 'running' ? { ...now, kind: 'cancelled' } : now));
   }
 

@@ -8,6 +8,8 @@ export interface MethodEntry extends Docstring {
   /** `radiatorFactor`, or `HouseNetwork.prepare` for a method */
   name: string;
   file: string;
+  /** false for classes and their methods */
+  isFunction: boolean;
   /** the signature carries numbers: a quantity, so a unit and a source are due */
   numeric: boolean;
 }
@@ -50,7 +52,13 @@ function entry(file: string, name: string | undefined, node: Callable | ts.Class
     ? []
     : [...node.parameters.map((parameter) => parameter.getText()), node.type?.getText() ?? ''];
   const numeric = types.some((type) => NUMERIC_TYPE.test(type));
-  return { ...readDocstring(docstringOf(node)), name: name ?? 'default', file, numeric };
+  return {
+    ...readDocstring(docstringOf(node)),
+    name: name ?? 'default',
+    file,
+    isFunction: ts.isFunctionDeclaration(node),
+    numeric,
+  };
 }
 
 function classEntries(file: string, node: ts.ClassDeclaration): MethodEntry[] {

@@ -3,7 +3,7 @@
  * exponential of its linearised balance around the stable root of the quadratic loss, so that the moments at
  * which the controller switches come in closed form.
  *
- * @see ISO 9806:2017, collector model of clause 24 (from memory); model.md sections 3, 7 and 12 of the method pages
+ * @see ISO 9806:2017, collector model of clause 24 (from memory); own definition of the drained state, method pages, choices
  */
 
 import { WATER_SPECIFIC_HEAT_J_PER_KG_K as CP } from '@/lib/physics/water';

@@ -6,7 +6,7 @@
  * and draining move that mass, so that heat and water are conserved exactly.
  *
  * @see Duffie & Beckman, Solar Engineering of Thermal Processes, 4th ed. 2013, sec. 8.4 (layered store);
- *      net-flow form and numerics: model.md section 7 of the method pages
+ *      net-flow form and numerics: own definition, method pages, choices
  */
 
 import { WATER_SPECIFIC_HEAT_J_PER_KG_K as CP } from '@/lib/physics/water';
