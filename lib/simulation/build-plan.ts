@@ -113,12 +113,43 @@ export class PlanBuilder {
     };
     const first = field(design);
     const second = design.second && hangs(design.second.array) ? field(design.second) : null;
-    const columns: PlanColumns = { outdoorC: site.outdoorC, ...first.columns, ...this.houseColumns(input) };
+    const ofHouse = this.houseColumns(input);
+    const columns: PlanColumns = {
+      outdoorC: site.outdoorC,
+      planeWm2: first.columns.planeWm2,
+      mounted: first.columns.mounted,
+      absorbedWm2: first.columns.absorbedWm2,
+      a1: first.columns.a1,
+      windowSunW: ofHouse.windowSunW,
+      supplySetC: ofHouse.supplySetC,
+      roomSetC: ofHouse.roomSetC,
+      heatingEfficiency: ofHouse.heatingEfficiency,
+      tapEfficiency: ofHouse.tapEfficiency,
+      tapKgPerS: ofHouse.tapKgPerS,
+      mainsC: ofHouse.mainsC,
+    };
     const toSlab = design.loop.layout === 'straight to the slab';
     const storeKg = design.store.volumeL * WATER_KG_PER_L;
     const baseM2 = design.store.volumeL / L_PER_M3 / design.store.heightM;
+    // every field by name: objects of one shape keep the year loop fast
     return {
-      ...housePlan,
+      network: housePlan.network,
+      ventilationWPerK: housePlan.ventilationWPerK,
+      windowOpening: housePlan.windowOpening,
+      internalW: housePlan.internalW,
+      roomSetC: housePlan.roomSetC,
+      staticLossWPerK: housePlan.staticLossWPerK,
+      ideal: housePlan.ideal,
+      loopKgPerS: housePlan.loopKgPerS,
+      floorWPerK: housePlan.floorWPerK,
+      floorKH: housePlan.floorKH,
+      floorAreaM2: housePlan.floorAreaM2,
+      floorDownward: housePlan.floorDownward,
+      radiatorWPerK: housePlan.radiatorWPerK,
+      tapSetC: housePlan.tapSetC,
+      exchangerEffectiveness: housePlan.exchangerEffectiveness,
+      coilWPerK: housePlan.coilWPerK,
+      ratedW: housePlan.ratedW,
       columns,
       theta: numerics.theta,
       stepsPerHour: STEPS_PER_HOUR,
