@@ -2,8 +2,8 @@
 
 import Link from 'next/link';
 import { Popover } from 'radix-ui';
-import { useState } from 'react';
-import type { ReactNode } from 'react';
+import { useRef, useState } from 'react';
+import type { ReactNode, RefObject } from 'react';
 import { OriginMark } from '@/components/forms/origin-mark';
 import type { ExplainedInput, Explanation } from './explanation';
 
@@ -19,31 +19,62 @@ interface HowComputedProps {
 
 const DOTTED = 'inline-block min-h-6 underline decoration-line decoration-dotted underline-offset-4';
 
-/** A number that opens how it was computed: equation, inputs with their origins, source, method pages. */
+/**
+ * A number that opens how it was computed: equation, inputs with their origins, source, method pages. Closed it is a
+ * plain button, because dozens of them are drawn with every year while a lever moves.
+ */
 export function HowComputed({ explain, className = DOTTED, label, children }: HowComputedProps) {
   const [open, setOpen] = useState(false);
-  const explanation = open ? explain() : undefined;
+  const button = useRef<HTMLButtonElement>(null);
   return (
-    <Popover.Root open={open} onOpenChange={setOpen}>
-      <Popover.Trigger
+    <>
+      <button
+        ref={button}
+        type="button"
         className={`${className} whitespace-nowrap hover:bg-band`}
         title="How it was computed"
         aria-label={label}
+        aria-haspopup="dialog"
+        aria-expanded={open}
+        onClick={() => setOpen(!open)}
       >
         {children}
-      </Popover.Trigger>
+      </button>
+      {open && <ExplanationPopover explanation={explain()} anchor={button} onClose={() => setOpen(false)} />}
+    </>
+  );
+}
+
+interface ExplanationPopoverProps {
+  explanation: Explanation;
+  anchor: RefObject<HTMLButtonElement | null>;
+  onClose(): void;
+}
+
+function ExplanationPopover({ explanation, anchor, onClose }: ExplanationPopoverProps) {
+  const leftForElsewhere = useRef(false);
+  return (
+    <Popover.Root open onOpenChange={onClose}>
+      <Popover.Anchor virtualRef={anchor} />
       <Popover.Portal>
-        {explanation && (
-          <Popover.Content
-            sideOffset={8}
-            collisionPadding={16}
-            aria-label={`How it was computed: ${explanation.title}`}
-            className="z-10 max-h-(--radix-popover-content-available-height) w-[min(28rem,calc(100vw-2rem))] overflow-y-auto border border-ink bg-paper p-4 font-text text-body"
-          >
-            <ExplanationSheet explanation={explanation} />
-            <Popover.Close className="mt-3 word">Close</Popover.Close>
-          </Popover.Content>
-        )}
+        <Popover.Content
+          sideOffset={8}
+          collisionPadding={16}
+          aria-label={`How it was computed: ${explanation.title}`}
+          className="z-10 max-h-(--radix-popover-content-available-height) w-[min(28rem,calc(100vw-2rem))] overflow-y-auto border border-ink bg-paper p-4 font-text text-body"
+          onInteractOutside={(event) => {
+            leftForElsewhere.current = true;
+            // The button closes by itself; closed from here first, its click would open the sheet again.
+            if (anchor.current?.contains(event.target as Node)) event.preventDefault();
+          }}
+          onCloseAutoFocus={(event) => {
+            event.preventDefault();
+            if (!leftForElsewhere.current) anchor.current?.focus();
+          }}
+        >
+          <ExplanationSheet explanation={explanation} />
+          <Popover.Close className="mt-3 word">Close</Popover.Close>
+        </Popover.Content>
       </Popover.Portal>
     </Popover.Root>
   );

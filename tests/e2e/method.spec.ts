@@ -31,6 +31,22 @@ test('from the verdict to a standard in two clicks', async ({ page }) => {
   await expect(equation).toContainText('ISO 9488');
 });
 
+test('the sheet gives the keyboard back to its number, and a second press closes it', async ({ page }) => {
+  await firstYear(page);
+  const number = page.getByTestId('verdict').getByRole('button').nth(2);
+  await number.focus();
+  await page.keyboard.press('Enter');
+  const sheet = page.getByRole('dialog', { name: 'How it was computed: Cost of solar heat' });
+  await expect(sheet).toBeVisible();
+  await page.keyboard.press('Escape');
+  await expect(sheet).toBeHidden();
+  await expect(number).toBeFocused();
+  await number.click();
+  await expect(sheet).toBeVisible();
+  await number.click();
+  await expect(sheet).toBeHidden();
+});
+
 test('a fraction, the balance and the price lead to their equations too', async ({ page }) => {
   await firstYear(page);
   for (const [section, number, link] of [
