@@ -21,7 +21,9 @@ function atArea(drawn: AnyDesign, areaM2: number): AnyDesign {
   const controller = { ...design.controller, startK: 7, stopK: 2, minimumRunS: 0, inhibitC: 130 };
   const pump = { ...design.loop.pump, kind: 'flow' as const };
   const loop = { ...design.loop, layout: 'through the store' as const, pump };
-  const store = { ...design.store, insulationMm: 500, insulationConductivity: 0.02, roomC: 10 };
+  // in a room as warm as the mains: a colder one is a threshold of its own
+  const roomC = drawn.house.hotWater.mainsMeanC;
+  const store = { ...design.store, insulationMm: 500, insulationConductivity: 0.02, roomC };
   return { ...drawn, design: { ...design, array, second: null, loop, controller, store } };
 }
 
