@@ -53,10 +53,17 @@ export function Study(props: StudyProps) {
     setDesign(saved);
   }
   const [firstDay, setFirstDay] = useState(winterInTheMiddle(weather));
-  const questions = useMemo(
-    () => [design, saved].map((one) => ({ weather: weather.source, house, design: one, prices })),
-    [weather.source, house, design, saved, prices],
+  // each question of its own, so that a lever that moves does not ask the saved design's year again
+  const { source } = weather;
+  const question = useMemo(
+    () => ({ weather: source, house, design, prices }),
+    [source, house, design, prices],
   );
+  const savedQuestion = useMemo(
+    () => ({ weather: source, house, design: saved, prices }),
+    [source, house, saved, prices],
+  );
+  const questions = useMemo(() => [question, savedQuestion], [question, savedQuestion]);
   const [current, stored] = useYears(questions);
   const { answer, failure, feed, retry } = current!;
   const settled = useSettled(answer, FIGURES_STILL_MS);
@@ -95,7 +102,7 @@ export function Study(props: StudyProps) {
             <LeversPanel
               design={design}
               saved={saved}
-              question={questions[0]!}
+              question={question}
               answer={answer}
               firstDay={firstDay}
               changed={changed}
