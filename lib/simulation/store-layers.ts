@@ -138,7 +138,8 @@ export class StoreLayers {
     const drawn = f.heatingKgPerS + f.tapKgPerS;
     let charge = 0;
     for (let k = 0; k < f.charges.length; k++) charge += f.charges[k]!.kgPerS;
-    const largest = Math.max(charge, drawn);
+    // a coil takes from a layer what its tap water carries, beside what flows through
+    const largest = Math.max(charge, drawn) + f.coilKgPerS;
     let limit = largest > 0 ? (theta * this.layerKg) / largest : Infinity;
     if (f.heatingKgPerS > 0 && this.count > 1) {
       const top = this.t[0]!;
