@@ -1,6 +1,6 @@
 import { FLOOR_LIMITS } from '@/lib/physics/floor';
 import type { PartDryness } from '@/lib/simulation/results';
-import { pumpDuty } from '@/lib/simulation/build-plan';
+import { pumpDuty } from '@/lib/simulation/field-plan';
 import { builtFields } from '@/lib/simulation/built-fields';
 import { emitterLoop, houseHeat } from '@/lib/simulation/house-heat';
 import { shortestNoonShadow } from '@/lib/sun/row-shading';

@@ -9,6 +9,16 @@ export interface EngineChange {
 /** Results that change, the newest version first; the numbers are those of the demonstration's designs. */
 export const CHANGES: readonly EngineChange[] = [
   {
+    version: '0.2.1',
+    date: '2026-12-01',
+    moves: [
+      {
+        what: 'The draw of a hot-water coil counts in the length of a sub-step.',
+        byHowMuch: 'Heat by less than 0.005 % with a coil, nothing without one.',
+      },
+    ],
+  },
+  {
     version: '0.2.0',
     date: '2026-12-01',
     moves: [

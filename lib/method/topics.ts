@@ -152,6 +152,8 @@ export const WITHOUT_EQUATIONS: readonly string[] = [
     'build-plan',
     'design',
     'engine-version',
+    'field-plan',
+    'hour-columns',
     'plan',
     'results',
     'site-cache',

@@ -1,48 +1,40 @@
-import { linearLoss, quadraticLoss, REFERENCE_WIND_M_PER_S } from '@/lib/physics/collector';
+import { linearLoss, REFERENCE_WIND_M_PER_S } from '@/lib/physics/collector';
 import { slabCapacity, supplyToSlabConductance } from '@/lib/physics/floor';
-import { heatPumpCop } from '@/lib/physics/heat-pump';
-import { mainsC, tappingShares } from '@/lib/physics/hot-water';
 import { resetSupplyC } from '@/lib/physics/outdoor-reset';
-import { radiatorHeat } from '@/lib/physics/radiator';
-import { pressureDropPa } from '@/lib/physics/pipe-flow';
-import { frictionHeadM, liftPowerW, runningFlowKgPerS, runningHeadM } from '@/lib/physics/pump';
 import { layerLossesWPerK } from '@/lib/physics/store-loss';
-import {
-  waterDensity,
-  waterViscosity,
-  WATER_KG_PER_L,
-  WATER_SPECIFIC_HEAT_J_PER_KG_K as CP,
-} from '@/lib/physics/water';
-import { solarApertureM2 } from '@/lib/physics/window-gain';
+import { WATER_KG_PER_L, WATER_SPECIFIC_HEAT_J_PER_KG_K as CP } from '@/lib/physics/water';
 import type { PlaneYear } from '@/lib/sun/plane-year';
 import {
-  HOURS_PER_DAY,
   HOURS_PER_YEAR,
   L_PER_M3,
   MM_PER_M,
-  SECONDS_PER_HOUR,
   STEFAN_BOLTZMANN,
   toKelvin,
   toRadians,
 } from '@/lib/units/constants';
 import type { WeatherYear } from '@/lib/weather/weather-year';
 import { acceptedSun } from './accepted-sun';
-import type { Collector, CollectorArray, Design, House, SkyModel } from './design';
+import type { Collector, CollectorArray, Design, House } from './design';
 import { dryColumns, type DryColumns } from './dry-hours';
+import { arrayInput, hangs, pumpDuty, type Field } from './field-plan';
+import {
+  efficiencyColumns,
+  mountedHours,
+  NO_FLOW,
+  radiatorTable,
+  roomSetColumn,
+  tapColumns,
+  windowSun,
+} from './hour-columns';
 import { emitterLoop, houseHeat } from './house-heat';
-import { EXCESS_STEP_K, EXCESS_STEPS, type FieldPlan, type Plan, type PlanColumns } from './plan';
+import type { FieldPlan, Plan, PlanColumns } from './plan';
 import type { SimulationInput } from './simulate';
 import { SiteCache } from './site-cache';
-import { monthOf } from './tally';
 
 /** Vertical conduction of a store: water, wall and mixing together [W/(m K)]. */
 const STORE_CONDUCTIVITY = 1;
 /** Screed below the pipe's crown that takes part in storing heat [mm]. */
 const SCREED_AROUND_PIPE_MM = 20;
-/** Water at which pipe friction is worked [°C]; roughness of drawn pipe [m]; bends and tees of one loop [-]. */
-const FRICTION_WATER_C = 30;
-const PIPE_ROUGHNESS_M = 1.5e-6;
-const LOOP_FITTINGS = 12;
 /** Outer steps of a quarter of an hour. */
 const STEPS_PER_HOUR = 4;
 /** A run is given up beyond this many sub-steps; an ordinary design takes about 50,000. */
@@ -51,13 +43,6 @@ const KEPT = 12;
 /** Locks open again this far below their limit: store top, room air [K]. */
 const STORE_UNLOCK_K = 2;
 const SLAB_UNLOCK_K = 0.5;
-/** Greatest share of heat that an exchanger is trusted with [-]. */
-const GREATEST_HANDOVER = 0.98;
-/** A small flow that stands for none where a flow divides. */
-const NO_FLOW = 1e-9;
-
-/** One collector field: collectors and how they hang. */
-type Field = Pick<Design, 'collector' | 'array'>;
 
 /** Keeps the newest few values by key. */
 class Memo<T> {
@@ -327,165 +312,4 @@ export class PlanBuilder {
       ratedW: house.backup.ratedW,
     };
   }
-}
-
-/** Whether an array has area and months. */
-function hangs(array: CollectorArray): boolean {
-  return array.areaM2 > 0 && array.mountedMonths.some(Boolean);
-}
-
-function windowSun(site: SiteCache, house: House, model: SkyModel): Float64Array {
-  const gain = new Float64Array(HOURS_PER_YEAR);
-  for (const window of house.windows) {
-    const aperture = solarApertureM2(window.areaM2, window.frameFraction, window.gValue, window.shade);
-    const wall = { tiltDeg: 90, azimuthDeg: window.azimuthDeg };
-    const plane = site.plane(wall, model, { horizon: house.horizon });
-    for (let h = 0; h < HOURS_PER_YEAR; h++) gain[h]! += aperture * plane.totalWm2[h]!;
-  }
-  return gain;
-}
-
-/** Conductance of the radiators over the excess of the supply: their law needs powers, the loop only this table. */
-function radiatorTable(ratedW: number, exponent: number, kgPerS: number): Float64Array {
-  const table = new Float64Array(EXCESS_STEPS + 2);
-  if (ratedW <= 0) return table;
-  for (let i = 1; i < table.length; i++) {
-    const excessK = i * EXCESS_STEP_K;
-    table[i] = radiatorHeat(ratedW, exponent, excessK, Math.max(NO_FLOW, kgPerS) * CP, 0) / excessK;
-  }
-  return table;
-}
-
-function tapColumns(house: House, south: boolean): { tapKgPerS: Float64Array; mainsC: Float64Array } {
-  const { litresPerDay, profile, mainsMeanC, mainsAmplitudeK } = house.hotWater;
-  const shares = tappingShares(profile);
-  const tapKgPerS = new Float64Array(HOURS_PER_YEAR);
-  const mains = new Float64Array(HOURS_PER_YEAR);
-  for (let h = 0; h < HOURS_PER_YEAR; h++) {
-    const day = Math.floor(h / HOURS_PER_DAY);
-    tapKgPerS[h] = (litresPerDay * WATER_KG_PER_L * shares[h % HOURS_PER_DAY]!) / SECONDS_PER_HOUR;
-    mains[h] = mainsC(mainsMeanC, mainsAmplitudeK, day + 1, south);
-  }
-  return { tapKgPerS, mainsC: mains };
-}
-
-function roomSetColumn(house: House): Float64Array {
-  const { on, nightC, fromHour, toHour } = house.setback;
-  const column = new Float64Array(HOURS_PER_YEAR).fill(house.roomSetC);
-  if (!on) return column;
-  for (let h = 0; h < HOURS_PER_YEAR; h++) {
-    const hour = h % HOURS_PER_DAY;
-    const night = fromHour <= toHour ? hour >= fromHour && hour < toHour : hour >= fromHour || hour < toHour;
-    if (night) column[h] = Math.min(house.roomSetC, nightC);
-  }
-  return column;
-}
-
-/** Useful heat per bought energy by hour: a boiler's seasonal efficiency, or the heat pump at its two temperatures. */
-function efficiencyColumns(
-  house: House,
-  outdoorC: Float64Array,
-  supplySetC: Float64Array,
-): Pick<PlanColumns, 'heatingEfficiency' | 'tapEfficiency'> {
-  const { fuel, seasonalEfficiency, heatPump } = house.backup;
-  if (fuel !== 'heat pump') {
-    const constant = new Float64Array(HOURS_PER_YEAR).fill(seasonalEfficiency);
-    return { heatingEfficiency: constant, tapEfficiency: constant };
-  }
-  const sourceC = (h: number) => (heatPump.source === 'ground' ? heatPump.groundC : outdoorC[h]!);
-  return {
-    heatingEfficiency: supplySetC.map((supplyC, h) => heatPumpCop(sourceC(h), supplyC, heatPump.carnotShare)),
-    tapEfficiency: outdoorC.map((_, h) => heatPumpCop(sourceC(h), house.hotWater.setC, heatPump.carnotShare)),
-  };
-}
-
-function mountedHours(months: readonly boolean[]): Uint8Array {
-  const mounted = new Uint8Array(HOURS_PER_YEAR);
-  for (let h = 0; h < HOURS_PER_YEAR; h++) mounted[h] = months[monthOf(h)] ? 1 : 0;
-  return mounted;
-}
-
-function boreSectionM2(boreMm: number): number {
-  return 0.25 * Math.PI * (boreMm / MM_PER_M) ** 2;
-}
-
-function arrayInput(
-  design: Design,
-  { collector, array }: Field,
-  flowKgPerS: number,
-  house: { floorKH: number; floorAreaM2: number; floorDownward: number },
-): Plan['array'] {
-  const { controller, loop, store } = design;
-  const areaM2 = array.areaM2 * collector.widthFactor;
-  const pipeWaterL = 2 * array.pipeLengthM * boreSectionM2(array.pipeBoreMm) * L_PER_M3;
-  const ownVessel = loop.layout !== 'through the store';
-  const reserveL = ownVessel ? loop.vesselReserveL : 0;
-  const waterL = collector.curve.waterContentLPerM2 * areaM2 + pipeWaterL + reserveL;
-  return {
-    areaM2,
-    a2: quadraticLoss(collector.curve.a2, collector.curve.a8),
-    dryCapacityJPerK: collector.curve.dryCapacityJPerM2K * areaM2,
-    waterKg: array.areaM2 > 0 ? waterL * WATER_KG_PER_L : 0,
-    pipeCapacityJPerK: 2 * array.pipeLengthM * array.pipeCapacityJPerMK,
-    pipeLossWPerK: array.pipeLengthM * array.pipeLossWPerMK,
-    flowKgPerS,
-    handover: handover(design, flowKgPerS, house),
-    ownVessel,
-    vesselLossWPerK: loop.vesselLossWPerK,
-    vesselRoomC: store.roomC,
-    // a pump that cannot lift the water never starts
-    startK: flowKgPerS > 0 ? controller.startK : Infinity,
-    stopK: controller.stopK,
-    inhibitC: controller.inhibitC,
-    minimumRunS: controller.minimumRunS,
-  };
-}
-
-/** Share of the greatest possible heat that reaches the sink: all of it, the exchanger's, or the floor's at this flow. */
-function handover(
-  design: Design,
-  flowKgPerS: number,
-  house: { floorKH: number; floorAreaM2: number; floorDownward: number },
-): number {
-  const { layout, exchangerEffectiveness } = design.loop;
-  if (layout === 'through the store') return 1;
-  if (layout === 'vessel with exchanger') return exchangerEffectiveness;
-  if (house.floorAreaM2 <= 0 || flowKgPerS <= 0) return GREATEST_HANDOVER;
-  const upWPerK = (1 - house.floorDownward) * flowKgPerS * CP;
-  const up = supplyToSlabConductance(house.floorAreaM2, house.floorKH, upWPerK);
-  return Math.min(GREATEST_HANDOVER, up / upWPerK);
-}
-
-/** Flow and electric power of the running pump: the flow is given, or follows from its curve against lift and pipes. */
-export function pumpDuty({ array, loop }: Pick<Design, 'array' | 'loop'>): {
-  flowKgPerS: number;
-  powerW: number;
-  fillHeadM: number;
-} {
-  const density = waterDensity(FRICTION_WATER_C);
-  const viscosity = waterViscosity(FRICTION_WATER_C);
-  const run = {
-    lengthM: 2 * array.pipeLengthM,
-    boreM: array.pipeBoreMm / MM_PER_M,
-    roughnessM: PIPE_ROUGHNESS_M,
-    fittings: LOOP_FITTINGS,
-  };
-  const frictionM = (flowKgPerS: number) =>
-    frictionHeadM(pressureDropPa(run, flowKgPerS / density, { density, viscosity }), density);
-  const siphon = loop.pump.returnPipe === 'siphon';
-  const given = array.flowKgPerSM2 * array.areaM2;
-  const flowKgPerS =
-    loop.pump.kind === 'flow' || array.areaM2 <= 0
-      ? given
-      : runningFlowKgPerS(
-          loop.pump.shutOffHeadM,
-          (loop.pump.greatestFlowLPerS * density) / L_PER_M3,
-          (flow) => runningHeadM(array.liftM, frictionM(flow), siphon),
-        );
-  const headM = runningHeadM(array.liftM, frictionM(flowKgPerS), siphon);
-  return {
-    flowKgPerS,
-    powerW: liftPowerW(flowKgPerS, headM, array.pumpEfficiency),
-    fillHeadM: runningHeadM(array.liftM, frictionM(0.5 * flowKgPerS), false),
-  };
 }

@@ -80,7 +80,7 @@ export const plantedFaults: readonly PlantedFault[] = [
   },
   {
     name: 'array put up a month early',
-    file: 'lib/simulation/build-plan.ts',
+    file: 'lib/simulation/hour-columns.ts',
     search: 'months[monthOf(h)] ? 1 : 0',
     replace: 'months[(monthOf(h) + 1) % 12] ? 1 : 0',
     tests: YEAR,
@@ -140,7 +140,7 @@ export const plantedFaults: readonly PlantedFault[] = [
   },
   {
     name: 'heat pump warms taps and rooms the wrong way round',
-    file: 'lib/simulation/build-plan.ts',
+    file: 'lib/simulation/hour-columns.ts',
     search: 'heatPumpCop(sourceC(h), house.hotWater.setC, heatPump.carnotShare)',
     replace: 'heatPumpCop(sourceC(h), supplySetC[h]!, heatPump.carnotShare)',
     tests: ['tests/simulation/setback-and-heat-pump.test.ts'],
