@@ -169,7 +169,10 @@ function FormSheet<T extends FieldValues>(props: SchemaFormProps<T> & { inBrowse
             />
             <div className="mt-4 grid gap-x-10 gap-y-6 lg:grid-cols-[200px_minmax(0,1fr)] xl:grid-cols-[200px_minmax(0,1fr)_262px]">
               <Contents entries={contents} focused={focused} />
-              <div className="min-w-0 space-y-10">{props.children}</div>
+              {/* until the script is there nothing could keep what is typed, so nothing can be typed */}
+              <fieldset disabled={!props.inBrowser} className="min-w-0 space-y-10">
+                {props.children}
+              </fieldset>
               <MarginNotes />
             </div>
           </form>
